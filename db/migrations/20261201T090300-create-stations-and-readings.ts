@@ -69,9 +69,9 @@ export const up: Migration['up'] = async ({ sql }) => {
       line integer not null,
       column_name text not null,
       reason text not null,
-      raw text not null
+      raw text not null,
+      primary key (upload_id, line, column_name)
     );
-    create index upload_rejects_by_upload on upload_rejects (upload_id, line);
 
     create table readings (
       station_id integer not null,

@@ -11,9 +11,9 @@ export class UploadReject extends Model<InferAttributes<UploadReject>, InferCrea
 export function initUploadReject(sequelize: Sequelize): typeof UploadReject {
   return UploadReject.init(
     {
-      uploadId: { type: DataTypes.INTEGER, allowNull: false },
-      line: { type: DataTypes.INTEGER, allowNull: false },
-      columnName: { type: DataTypes.TEXT, allowNull: false },
+      uploadId: { type: DataTypes.INTEGER, primaryKey: true },
+      line: { type: DataTypes.INTEGER, primaryKey: true },
+      columnName: { type: DataTypes.TEXT, primaryKey: true },
       reason: { type: DataTypes.TEXT, allowNull: false },
       raw: { type: DataTypes.TEXT, allowNull: false },
     },
