@@ -1,0 +1,92 @@
+'use client';
+
+import { Dialog as Primitive } from 'radix-ui';
+import { type ReactNode } from 'react';
+import { Button } from './button';
+import { classNames } from './class-names';
+
+export type DialogProps = Readonly<{
+  isOpen: boolean;
+  onOpenChange: (isOpen: boolean) => void;
+  title: string;
+  /** One sentence on what this is for. */
+  description?: ReactNode;
+  children: ReactNode;
+  className?: string;
+}>;
+
+const overlay = 'fixed inset-0 z-40 bg-black/55';
+
+/** Asks for something before anything else goes on. Escape and the close button leave it. */
+export function Dialog({ isOpen, onOpenChange, title, description, children, className }: DialogProps) {
+  return (
+    <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
+      <Primitive.Portal>
+        <Primitive.Overlay className={overlay} />
+        <Primitive.Content
+          {...(description ? {} : { 'aria-describedby': undefined })}
+          className={classNames(
+            'appear fixed inset-x-4 top-[max(1rem,10vh)] z-50 mx-auto max-h-[80vh] max-w-lg overflow-y-auto rounded-lg border bg-panel p-5 text-ink shadow-2xl outline-none',
+            className,
+          )}
+        >
+          <header className="mb-4 flex items-start justify-between gap-4">
+            <div>
+              <Primitive.Title className="text-xl font-bold">{title}</Primitive.Title>
+              {description ? (
+                <Primitive.Description className="mt-1 text-soft">{description}</Primitive.Description>
+              ) : null}
+            </div>
+            <Primitive.Close asChild>
+              <Button variant="quiet" size="small">
+                Close
+              </Button>
+            </Primitive.Close>
+          </header>
+          {children}
+        </Primitive.Content>
+      </Primitive.Portal>
+    </Primitive.Root>
+  );
+}
+
+export type SheetProps = DialogProps & Readonly<{ side?: 'right' | 'bottom' }>;
+
+const sides = {
+  right: 'inset-y-0 right-0 w-[min(28rem,100vw)] border-l',
+  bottom: 'inset-x-0 bottom-0 max-h-[85dvh] rounded-t-xl border-t pb-[max(1.25rem,env(safe-area-inset-bottom))]',
+} as const;
+
+/** Work beside the page it belongs to. */
+export function Sheet({ isOpen, onOpenChange, title, description, children, className, side = 'right' }: SheetProps) {
+  return (
+    <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
+      <Primitive.Portal>
+        <Primitive.Overlay className={overlay} />
+        <Primitive.Content
+          {...(description ? {} : { 'aria-describedby': undefined })}
+          className={classNames(
+            'appear fixed z-50 overflow-y-auto bg-panel p-5 text-ink shadow-2xl outline-none',
+            sides[side],
+            className,
+          )}
+        >
+          <header className="mb-5 flex items-start justify-between gap-4">
+            <div>
+              <Primitive.Title className="text-xl font-bold">{title}</Primitive.Title>
+              {description ? (
+                <Primitive.Description className="mt-1 text-soft">{description}</Primitive.Description>
+              ) : null}
+            </div>
+            <Primitive.Close asChild>
+              <Button variant="quiet" size="small">
+                Close
+              </Button>
+            </Primitive.Close>
+          </header>
+          {children}
+        </Primitive.Content>
+      </Primitive.Portal>
+    </Primitive.Root>
+  );
+}
