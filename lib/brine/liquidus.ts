@@ -26,6 +26,8 @@ export interface FreezingPoint {
   readonly icePointC: number | null;
   /** °C at which the first salt crystallises, if any does down to −70 °C; colder than the ice point it is academic. */
   readonly saltPointC: number | null;
+  /** Which salt that is. */
+  readonly saltSolid: CrystalFormula | null;
 }
 
 export type FreezingPointResult =
@@ -57,11 +59,13 @@ export function freezingPointOf(perWater: SaltPerWater): FreezingPointResult {
   const icePoint = icePointC(perWater);
   const salt = crystallisations(perWater)[0];
   const saltPointC = salt?.tempC ?? null;
+  const saltSolid = salt?.solid.formula ?? null;
+  const both = { icePointC: icePoint, saltPointC, saltSolid };
   if (salt !== undefined && (icePoint === null || salt.tempC > icePoint)) {
-    return { ok: true, freezingPointC: salt.tempC, solid: salt.solid.formula, icePointC: icePoint, saltPointC };
+    return { ok: true, freezingPointC: salt.tempC, solid: salt.solid.formula, ...both };
   }
   if (icePoint === null) return { ok: false, reason: 'below-model', limitC: -70 };
-  return { ok: true, freezingPointC: icePoint, solid: 'ice', icePointC: icePoint, saltPointC };
+  return { ok: true, freezingPointC: icePoint, solid: 'ice', ...both };
 }
 
 /**
