@@ -1,6 +1,5 @@
 import { type Recorded, type SpreadEntryInput } from '@/lib/contracts/runs';
 import { Problem } from '@/lib/problem';
-import { database } from '../connection';
 import { findRun } from '../queries/runs';
 import { inTransaction, selectRows, type Tx } from '../transaction';
 import { recordAudit } from './audit';

@@ -107,6 +107,9 @@ export const RunRoad = z.object({
   rateGPerM2: z.number().nullable(),
   rateMlPerM2: z.number().nullable(),
   reason: z.string().nullable(),
+  pavementTempC: z.number().nullable(),
+  /** the entry last logged, for correcting it */
+  entryId: z.string().nullable(),
   /** what was logged; null while the road is still to do */
   outcome: z.enum(['spread', 'ploughed', 'skipped']).nullable(),
   loggedRateGPerM2: z.number().nullable(),
