@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto';
-import { existsSync, readFileSync, rmSync, statSync, truncateSync, writeFileSync } from 'node:fs';
+import { existsSync, rmSync, statSync, truncateSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { clusterFolder, identityOf, makeCluster, ownerOf, runAs, versionOf } from './cluster-folder.mjs';
-import { isUsed, join, keepRunning, leave, startedForRun } from './cluster-users.mjs';
+import { leases, takeLease } from './leases.mjs';
 import { withLock } from './lock.mjs';
 import { inData, readIfThere, writePrivately } from './place.mjs';
 import { freePortFrom } from './ports.mjs';
@@ -19,6 +19,8 @@ import { Stop } from './say.mjs';
 const firstPort = 55_432;
 const passwordFile = inData('pg.password');
 const portFile = inData('pg.port');
+// Whether the server was started for the length of a command ('run') or to stay ('kept').
+const startedFile = inData('pg.started-for');
 
 /**
  * The running server, told by the working folder of its process: a number in a pid file may belong to anyone.
@@ -172,7 +174,7 @@ async function started() {
 export const ensureCluster = () =>
   withLock('pg', async () => {
     const server = await started();
-    keepRunning();
+    writeFileSync(startedFile, 'kept\n');
     return server;
   });
 
@@ -182,19 +184,31 @@ export const ensureCluster = () =>
  * @returns {Promise<Server & { release: () => Promise<boolean> }>} `release` tells whether it stopped the server
  */
 export async function borrowCluster(label) {
-  const server = await withLock('pg', async () => {
+  const { server, lease } = await withLock('pg', async () => {
     const answer = await started();
-    join(label);
-    if (answer.wasStarted) startedForRun();
-    return answer;
+    if (answer.wasStarted) writeFileSync(startedFile, 'run\n');
+    return { server: answer, lease: takeLease('pg', { label }) };
   });
   const release = () =>
     withLock('pg', async () => {
-      const mayStop = leave();
-      return mayStop ? stop(await clusterFolder()) : false;
+      lease.end();
+      return isLeftOver() ? stop(await clusterFolder()) : false;
     });
   return { ...server, release };
 }
+
+/** Whether the server of this checkout is running; cheap enough to ask every second. */
+export async function clusterWatch() {
+  const folder = await clusterFolder();
+  return { isRunning: () => runningServer(folder) !== undefined, revive: () => withLock('pg', started) };
+}
+
+/** Whether the server was started for commands that are all over: what the last of them stops. */
+const isLeftOver = () => leases('pg').length === 0 && readIfThere(startedFile)?.trim() === 'run';
+
+/** Stops a server that killed commands left behind, and no other. */
+export const stopLeftOver = () =>
+  withLock('pg', async () => (isLeftOver() && (await stop(await clusterFolder())) ? 'stopped' : 'left as it is'));
 
 /**
  * @param {{ evenIfUsed: boolean }} how
@@ -202,7 +216,7 @@ export async function borrowCluster(label) {
  */
 export const stopCluster = ({ evenIfUsed }) =>
   withLock('pg', async () => {
-    const users = isUsed();
+    const users = leases('pg').map(({ label, pid }) => `${label} (process ${pid})`);
     if (users.length > 0 && !evenIfUsed) return { usedBy: users };
     return (await stop(await clusterFolder())) ? 'stopped' : 'was not running';
   });

@@ -9,13 +9,24 @@ export function withoutPgSettings() {
   return Object.fromEntries(Object.entries(process.env).filter(([name]) => !/^PG[A-Z]+$/.test(name)));
 }
 
+/** @type {Set<import('node:child_process').ChildProcess>} */
+const interruptible = new Set();
+
+/** Ends the long commands that are running now: packages, build, seed. */
+export function interrupt() {
+  for (const child of interruptible) child.kill('SIGTERM');
+}
+
 /**
  * Runs a command to its end and hands back what it printed; never throws for its exit code.
  * @param {readonly string[]} command
- * @param {{ input?: string, env?: NodeJS.ProcessEnv, cwd?: string, show?: boolean, timeoutMs?: number }} [options]
+ * @param {{ input?: string, env?: NodeJS.ProcessEnv, cwd?: string, show?: boolean, timeoutMs?: number, mayInterrupt?: boolean }} [options]
  * @returns {Promise<{ code: number, stdout: string, stderr: string }>}
  */
-export function run([program, ...args], { input, env = process.env, cwd, show = false, timeoutMs } = {}) {
+export function run(
+  [program, ...args],
+  { input, env = process.env, cwd, show = false, timeoutMs, mayInterrupt = false } = {},
+) {
   return new Promise((resolve) => {
     const child = spawn(program, args, {
       cwd,
@@ -24,6 +35,7 @@ export function run([program, ...args], { input, env = process.env, cwd, show = 
       killSignal: 'SIGKILL',
       stdio: [input === undefined ? 'ignore' : 'pipe', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
     });
+    if (mayInterrupt) interruptible.add(child);
     let stdout = '';
     let stderr = '';
     child.stdout?.setEncoding('utf8').on('data', (text) => (stdout += text));
@@ -31,7 +43,10 @@ export function run([program, ...args], { input, env = process.env, cwd, show = 
     child.stdin?.on('error', () => undefined);
     child.stdin?.end(input);
     child.on('error', (error) => resolve({ code: 127, stdout, stderr: `${stderr}${error.message}` }));
-    child.on('close', (code, signal) => resolve({ code: code ?? (signal ? 128 : 1), stdout, stderr }));
+    child.on('close', (code, signal) => {
+      interruptible.delete(child);
+      resolve({ code: code ?? (signal ? 128 : 1), stdout, stderr });
+    });
   });
 }
 

@@ -49,7 +49,7 @@ export async function step(title, work) {
  */
 export function explain(error) {
   if (error instanceof Stop) {
-    process.stderr.write(`\n${error.message}\n`);
+    if (error.message) process.stderr.write(`\n${error.message}\n`);
     return error.exitCode;
   }
   process.stderr.write(`\n${error instanceof Error ? (error.stack ?? error.message) : String(error)}\n`);
