@@ -1,31 +1,25 @@
-import { type Metadata } from 'next';
-import { EmptyState } from '@/components/ui/empty-state';
+import { permissions, roleNames, type Action } from '@/lib/permissions';
 import { LinkButton } from '@/components/ui/link-button';
+import { EmptyState } from '@/components/ui/empty-state';
 import { PageBody, PageHeader } from '@/components/ui/page-header';
-import { actions, permissions, roleNames } from '@/lib/permissions';
-import { requirePage } from '@/lib/server/page';
+import { getActor } from '@/lib/server/session';
 
-export const metadata: Metadata = { title: 'Not for your role' };
+export const metadata = { title: 'Not for your role' };
 
-type Search = Promise<{ for?: string | string[] }>;
-
-export default async function NotAllowedPage({ searchParams }: Readonly<{ searchParams: Search }>) {
-  const actor = await requirePage('bench.use');
-  const { for: asked } = await searchParams;
-  const action = actions.find((known) => known === asked);
-  const may = action
-    ? Object.keys(permissions[action].grants).map((role) => roleNames[role as keyof typeof roleNames].toLowerCase())
-    : [];
+export default async function NotAllowedPage({ searchParams }: PageProps<'/not-allowed'>) {
+  const [actor, { for: wanted }] = await Promise.all([getActor(), searchParams]);
+  const does =
+    typeof wanted === 'string' && wanted in permissions ? permissions[wanted as Action].does : 'see this page';
+  const role = actor ? roleNames[actor.role].toLowerCase() : 'person signed out';
   return (
     <>
       <PageHeader title="Not for your role" />
       <PageBody>
         <EmptyState
-          title={`You are signed in as ${roleNames[actor.role].toLowerCase()}, which may not ${action ? permissions[action].does : 'open this page'}.`}
-          action={<LinkButton href="/">Go to your first page</LinkButton>}
+          title={`A ${role} may not ${does}.`}
+          action={<LinkButton href="/">Go to your own screen</LinkButton>}
         >
-          {may.length > 0 ? `Roles that may: ${may.join(', ')}. ` : ''}
-          If you need it, ask an administrator to change your role. Nothing was changed.
+          If you need to, an administrator can change your role in Set-up, People.
         </EmptyState>
       </PageBody>
     </>
