@@ -1,21 +1,32 @@
-/** Points of the sodium chloride freezing curve: mass per cent, °C. Ice to the eutectic, then the dihydrate. */
-const ice: readonly (readonly [number, number])[] = [
+type Point = readonly [percent: number, tempC: number];
+
+/** Points of the sodium chloride freezing curve, for a picture: ice down to the eutectic, then the dihydrate. */
+const ice: readonly Point[] = [
   [0, 0],
-  [5, -3.05],
+  [2, -1.18],
+  [4, -2.41],
+  [6, -3.7],
+  [8, -5.08],
   [10, -6.56],
-  [15, -10.89],
+  [12, -8.18],
+  [14, -9.94],
+  [16, -11.89],
+  [18, -14.04],
   [20, -16.46],
+  [22, -19.18],
   [23.3, -21.1],
 ];
-const hydrate: readonly (readonly [number, number])[] = [
+const hydrate: readonly Point[] = [
   [23.3, -21.1],
-  [24, -17],
-  [25, -10],
+  [23.8, -17.3],
+  [24.4, -13],
+  [25.1, -8],
+  [25.8, -3],
   [26.3, 0.1],
 ];
 
-const at = ([percent, tempC]: readonly [number, number]) => `${40 + percent * 18},${40 - tempC * 17}`;
-const line = (points: readonly (readonly [number, number])[]) => `M${points.map(at).join('L')}`;
+const at = ([percent, tempC]: Point) => `${40 + percent * 18},${40 - tempC * 17}`;
+const line = (points: readonly Point[]) => `M${points.map(at).join('L')}`;
 
 /** The curve that everything here turns on, drawn large and quiet: for the page one signs in on. */
 export function BrineFigure({ className }: Readonly<{ className?: string }>) {
@@ -36,6 +47,15 @@ export function BrineFigure({ className }: Readonly<{ className?: string }>) {
       {[16.5, 14, 12, 10.4].map((percent) => (
         <circle key={percent} cx={40 + percent * 18} cy="142" r="4" className="fill-soft" />
       ))}
+      <text x="64" y="340" className="fill-frozen text-base">
+        ice and brine
+      </text>
+      <text x="330" y="84" className="fill-soft text-base">
+        all brine
+      </text>
+      <text x="212" y="170" className="fill-urgent text-base">
+        refreezes here
+      </text>
       <circle cx={40 + 9.3 * 18} cy="142" r="7" className="fill-urgent" />
     </svg>
   );

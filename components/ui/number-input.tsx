@@ -47,10 +47,15 @@ export function NumberInput({
       ? ''
       : trimmed(toDisplay(defaultValue, quantity, system), digits),
   );
+  const [isTouched, setIsTouched] = useState(false);
   const parsed = parseQuantity(text, quantity, system);
+  // A value nobody touched goes back as it came: shown in pounds and back would move it by a rounding.
+  const typed = parsed.ok ? String(parsed.value) : text;
+  const sent = isTouched || defaultValue === null || defaultValue === undefined ? typed : String(defaultValue);
   const unit = unitLabel(quantity, system);
   const type = (event: ChangeEvent<HTMLInputElement>) => {
     setText(event.target.value);
+    setIsTouched(true);
     const next = parseQuantity(event.target.value, quantity, system);
     onValue?.(next.ok ? next.value : null);
   };
@@ -66,7 +71,7 @@ export function NumberInput({
         className={classNames(inputLook, 'text-right font-mono')}
       />
       {unit ? <span className="shrink-0 text-sm text-soft">{unit}</span> : null}
-      {name ? <input type="hidden" name={name} value={parsed.ok ? String(parsed.value) : text} /> : null}
+      {name ? <input type="hidden" name={name} value={sent} /> : null}
     </span>
   );
 }

@@ -4,6 +4,7 @@ import Link from 'next/link';
 import { redirect } from 'next/navigation';
 import { BrineFigure } from '@/components/shell/brine-figure';
 import { Wordmark } from '@/components/shell/mark';
+import { Notice } from '@/components/ui/notice';
 import { signInLimits } from '@/db/commands/sign-in';
 import { findAgency } from '@/db/queries/agency';
 import { roleNames } from '@/lib/permissions';
@@ -12,7 +13,7 @@ import { SignInForm } from './sign-in-form';
 
 export const metadata: Metadata = { title: 'Sign in' };
 
-type Search = Promise<{ callbackUrl?: string | string[] }>;
+type Search = Promise<{ callbackUrl?: string | string[]; changed?: string | string[] }>;
 
 /** Only the path of the asked address: nobody is sent to another site after signing in. */
 function onwardsFrom(asked: string | string[] | undefined): string {
@@ -22,7 +23,7 @@ function onwardsFrom(asked: string | string[] | undefined): string {
 }
 
 export default async function SignInPage({ searchParams }: Readonly<{ searchParams: Search }>) {
-  const [{ callbackUrl }, actor, agency] = await Promise.all([searchParams, getActor(), findAgency()]);
+  const [{ callbackUrl, changed }, actor, agency] = await Promise.all([searchParams, getActor(), findAgency()]);
   const onwards = onwardsFrom(callbackUrl);
   if (actor) redirect(onwards as Route);
   return (
@@ -36,6 +37,9 @@ export default async function SignInPage({ searchParams }: Readonly<{ searchPara
               {agency.name ? `Sign in to the winter desk of ${agency.name}.` : 'Sign in to the winter desk.'}
             </p>
           </div>
+          {changed === 'password' ? (
+            <Notice tone="done" title="Your password is changed." todo="Sign in with the new one." />
+          ) : null}
           <SignInForm onwards={onwards} waitMin={signInLimits.windowMin} demo={null} />
         </div>
         <p className="text-sm text-faint">

@@ -1,0 +1,53 @@
+'use client';
+
+import { Checkbox } from '@/components/ui/checkbox';
+import { Field } from '@/components/ui/field';
+import { Form, type FormSubmission } from '@/components/ui/form';
+import { NumberInput } from '@/components/ui/number-input';
+import { TextInput } from '@/components/ui/text-input';
+import { type ListedYard } from './listed-fleet';
+
+export type YardFormProps = Readonly<{ yard: ListedYard | null; submission: FormSubmission }>;
+
+const shownFields = ['name', 'solidCapacityKg', 'brineCapacityL', 'latitudeDeg', 'longitudeDeg'];
+
+export function YardForm({ yard, submission }: YardFormProps) {
+  const { fields } = submission;
+  return (
+    <Form
+      submission={submission}
+      toInput={(typed) => ({ ...typed, id: yard?.id ?? null })}
+      submitLabel={yard ? 'Save' : 'Add'}
+      shownFields={shownFields}
+    >
+      <Field label="Name" error={fields.name}>
+        <TextInput name="name" defaultValue={yard?.name ?? ''} autoComplete="off" />
+      </Field>
+      <div className="grid grid-cols-2 gap-5">
+        <Field label="Holds salt" error={fields.solidCapacityKg}>
+          <NumberInput name="solidCapacityKg" quantity="largeMass" defaultValue={yard?.solidCapacityKg} />
+        </Field>
+        <Field label="Holds brine" error={fields.brineCapacityL}>
+          <NumberInput name="brineCapacityL" quantity="volume" defaultValue={yard?.brineCapacityL} digits={0} />
+        </Field>
+        <Field label="Latitude, degrees north" error={fields.latitudeDeg}>
+          <TextInput
+            name="latitudeDeg"
+            inputMode="decimal"
+            className="text-right font-mono"
+            defaultValue={yard?.latitudeDeg ?? ''}
+          />
+        </Field>
+        <Field label="Longitude, degrees east" error={fields.longitudeDeg}>
+          <TextInput
+            name="longitudeDeg"
+            inputMode="decimal"
+            className="text-right font-mono"
+            defaultValue={yard?.longitudeDeg ?? ''}
+          />
+        </Field>
+      </div>
+      <Checkbox name="isActive" label="In use" defaultChecked={yard?.isActive ?? true} />
+    </Form>
+  );
+}
