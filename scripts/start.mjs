@@ -99,6 +99,8 @@ async function watchDatabase(databaseUrl, moveTo) {
 
 async function main() {
   loadLocalSettings();
+  // A line for each request would push the address off the screen; in development it is wanted.
+  if (!isDev) process.env.LOG_LEVEL ??= 'error';
   const running = alreadyServing();
   if (running) return say(`Rimewright is running already, from process ${running.pid}:  ${running.url}`);
   say(isDev ? 'Rimewright, for development' : 'Rimewright');

@@ -13,7 +13,16 @@ export function loadLocalSettings() {
     if (existsSync(file)) process.loadEnvFile(file);
   }
   // An empty line in the file means "not set".
-  for (const name of ['DATABASE_URL', 'NEXTAUTH_URL', 'NEXTAUTH_SECRET', 'HOST', 'PORT', 'CHROMIUM_PATH']) {
+  for (const name of [
+    'DATABASE_URL',
+    'NEXTAUTH_URL',
+    'NEXTAUTH_SECRET',
+    'HOST',
+    'PORT',
+    'LOG_LEVEL',
+    'TILE_URL',
+    'CHROMIUM_PATH',
+  ]) {
     if (process.env[name] === '') delete process.env[name];
   }
 }

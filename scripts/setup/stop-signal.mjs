@@ -20,6 +20,11 @@ export function onStopSignal() {
   };
   const names = /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']);
   for (const name of names) process.on(name, hear);
+  // npm killed outright passes nothing on: whoever it had started would stay behind.
+  const parent = process.ppid;
+  const orphanWatch = setInterval(() => process.ppid !== parent && hear(), 1000);
+  orphanWatch.unref();
+  if (!process.env.npm_lifecycle_event) clearInterval(orphanWatch);
   // When the terminal is gone there is nobody to tell, and that must not end the orderly stop.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
   return {
@@ -32,9 +37,6 @@ export function onStopSignal() {
     /** @param {() => void} action */
     onInsist(action) {
       insist = () => void action();
-    },
-    done() {
-      for (const name of names) process.off(name, hear);
     },
   };
 }
