@@ -7,7 +7,6 @@ import { Wordmark } from '@/components/shell/mark';
 import { Notice } from '@/components/ui/notice';
 import { signInLimits } from '@/db/commands/sign-in';
 import { findAgency } from '@/db/queries/agency';
-import { roleNames } from '@/lib/permissions';
 import { getActor } from '@/lib/server/session';
 import { SignInForm } from './sign-in-form';
 

@@ -1,0 +1,65 @@
+'use client';
+
+import { PolicyForm } from '@/components/setup/policy/policy-form';
+import { useAnnounce } from '@/components/ui/announcements';
+import { Notice } from '@/components/ui/notice';
+import { PageBody, PageHeader } from '@/components/ui/page-header';
+import { Section } from '@/components/ui/section';
+import { Table } from '@/components/ui/table';
+import { useSubmission } from '@/components/ui/use-submission';
+import { type PolicyRules } from '@/lib/contracts/policy';
+import { BackToSetup } from '../back';
+import { adoptPolicyAction } from './actions';
+
+export interface PolicyVersion {
+  version: number;
+  adopted: string;
+  by: string | null;
+}
+
+export type PolicyScreenProps = Readonly<{ rules: PolicyRules | null; versions: readonly PolicyVersion[] }>;
+
+export function PolicyScreen({ rules, versions }: PolicyScreenProps) {
+  const announce = useAnnounce();
+  const submission = useSubmission(adoptPolicyAction, ({ version }) =>
+    announce(`Version ${version} is in force. Plans already worked out keep theirs.`),
+  );
+  const [inForce] = versions;
+  return (
+    <>
+      <PageHeader
+        back={<BackToSetup />}
+        title="Treatment policy"
+        facts={[inForce ? `Version ${inForce.version}, in force since ${inForce.adopted}` : 'None adopted yet']}
+      />
+      <PageBody className="max-w-5xl gap-10 lg:grid-cols-[minmax(0,1fr)_17rem]">
+        <div className="grid gap-6">
+          {inForce && !rules ? (
+            <Notice
+              tone="caution"
+              title={`Version ${inForce.version} was written by another release and cannot be shown here.`}
+              kept="It stays in force."
+              todo="Fill in every field to adopt a new version."
+            />
+          ) : null}
+          <PolicyForm rules={rules} basedOnVersion={inForce?.version ?? 0} submission={submission} />
+        </div>
+        <Section title="Versions">
+          <Table
+            caption="Versions of the policy"
+            rows={versions}
+            rowKey={({ version }) => version}
+            columns={[
+              { key: 'version', head: 'No.', isRowHead: true, cell: ({ version }) => version },
+              { key: 'adopted', head: 'Adopted', cell: ({ adopted }) => adopted },
+              { key: 'by', head: 'By', cell: ({ by }) => by ?? 'first set-up' },
+            ]}
+          />
+          <p className="mt-3 text-sm text-faint">
+            A plan names the version it was worked out under, so none is removed.
+          </p>
+        </Section>
+      </PageBody>
+    </>
+  );
+}
