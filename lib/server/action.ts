@@ -3,7 +3,7 @@ import { revalidatePath } from 'next/cache';
 import { type ZodType, type z } from 'zod';
 import { type Action, type Subject } from '@/lib/permissions';
 import { Problem, type ActionResult } from '@/lib/problem';
-import { authorize } from './authorize';
+import { authorize, refuseHopeless } from './authorize';
 import { invalidInput, viewOf } from './problems';
 import { getActor, type SignedIn } from './session';
 
@@ -27,6 +27,7 @@ export function action<I extends ZodType, T>(
     try {
       const actor = await getActor();
       if (!actor) throw new Problem('not-signed-in');
+      refuseHopeless(actor, declaration.action);
       const input = declaration.input.safeParse(given);
       if (!input.success) throw invalidInput(input.error);
       const subject = await declaration.subject?.({ input: input.data, actor });

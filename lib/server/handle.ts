@@ -2,7 +2,7 @@ import 'server-only';
 import { type ZodType, type z } from 'zod';
 import { type Action, type Subject } from '@/lib/permissions';
 import { Problem } from '@/lib/problem';
-import { authorize } from './authorize';
+import { authorize, refuseHopeless } from './authorize';
 import { log } from './log';
 import { invalidInput, viewOf } from './problems';
 import { getActor, type SignedIn } from './session';
@@ -100,6 +100,7 @@ async function answer<
 ): Promise<Response> {
   const isPublic = declaration.action === 'public';
   const signedIn = isPublic ? null : await getActor();
+  if (signedIn && declaration.action !== 'public') refuseHopeless(signedIn, declaration.action);
   // The signed-out learn nothing about what a route accepts; a machine's key is judged once its address is read.
   if (!isPublic && !signedIn && !declaration.machine) throw new Problem('not-signed-in');
   const params = parse(declaration.params, rawParams) as Out<P>;
