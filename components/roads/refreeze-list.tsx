@@ -1,0 +1,71 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { classNames } from '@/components/ui/class-names';
+import { RefreezeRow } from './refreeze-row';
+import { type RoadNow } from './road-now';
+
+export type RefreezeListProps = Readonly<{
+  /** In order: what refreezes first stands first. */
+  roads: readonly RoadNow[];
+  selectedId: number | null;
+  /** How far the forecast reaches from the cursor. */
+  longestMin: number;
+  onSelect: (id: number) => void;
+  onPoint?: (id: number | null) => void;
+  className?: string;
+}>;
+
+const shownAtFirst = 40;
+const ignore = () => undefined;
+
+/** Which road refreezes first, and will a truck be there before it does: the map's twin in words. */
+export function RefreezeList({
+  roads,
+  selectedId,
+  longestMin,
+  onSelect,
+  onPoint = ignore,
+  className,
+}: RefreezeListProps) {
+  const [isAll, setIsAll] = useState(false);
+  const shown = isAll ? roads : roads.slice(0, shownAtFirst);
+  const chosen =
+    selectedId === null || shown.some((road) => road.id === selectedId)
+      ? undefined
+      : roads.find((road) => road.id === selectedId);
+  return (
+    <section aria-label="Refreezes first" className={classNames('flex min-h-0 flex-col', className)}>
+      <header className="flex items-baseline gap-2 border-b px-4 py-2">
+        <h2 className="flex-1 font-bold">Refreezes first</h2>
+        {['hold', 'next pass', 'slack'].map((word) => (
+          <span key={word} aria-hidden className="w-[3.4rem] text-right text-sm text-soft">
+            {word}
+          </span>
+        ))}
+      </header>
+      <div className="min-h-0 flex-1 overflow-y-auto">
+        <ol>
+          {[...shown, ...(chosen ? [chosen] : [])].map((road) => (
+            <RefreezeRow
+              key={road.id}
+              road={road}
+              isChosen={road.id === selectedId}
+              longestMin={longestMin}
+              onSelect={onSelect}
+              onPoint={onPoint}
+            />
+          ))}
+        </ol>
+        {roads.length > shownAtFirst ? (
+          <p className="px-4 py-3">
+            <Button size="small" variant="quiet" onClick={() => setIsAll(!isAll)}>
+              {isAll ? `Show the first ${shownAtFirst}` : `Show all ${roads.length} roads`}
+            </Button>
+          </p>
+        ) : null}
+      </div>
+    </section>
+  );
+}
