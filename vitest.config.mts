@@ -43,6 +43,8 @@ export default defineConfig({
           testTimeout: 30_000,
           hookTimeout: 60_000,
           maxWorkers: 2,
+          // Tiers with their own number of workers run one after another.
+          sequence: { groupOrder: 1 },
         },
       },
       {
@@ -56,6 +58,7 @@ export default defineConfig({
           testTimeout: 60_000,
           hookTimeout: 120_000,
           fileParallelism: false,
+          sequence: { groupOrder: 2 },
         },
       },
       {
@@ -68,6 +71,7 @@ export default defineConfig({
           testTimeout: 120_000,
           hookTimeout: 120_000,
           fileParallelism: false,
+          sequence: { groupOrder: 3 },
         },
       },
     ],
