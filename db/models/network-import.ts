@@ -12,6 +12,8 @@ export class NetworkImport extends Model<InferAttributes<NetworkImport>, InferCr
   declare state: 'previewed' | 'applied' | 'undone' | 'discarded';
   declare fileName: string;
   declare sha256: string;
+  /** Files under one name replace each other. */
+  declare source: CreationOptional<string>;
   declare attribution: CreationOptional<string>;
   declare classMapping: unknown;
   declare report: unknown;
@@ -32,6 +34,7 @@ export function initNetworkImport(sequelize: Sequelize): typeof NetworkImport {
       state: { type: DataTypes.TEXT, allowNull: false },
       fileName: { type: DataTypes.TEXT, allowNull: false },
       sha256: { type: DataTypes.TEXT, allowNull: false },
+      source: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
       attribution: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
       classMapping: { type: DataTypes.JSONB, allowNull: false },
       report: { type: DataTypes.JSONB, allowNull: false },

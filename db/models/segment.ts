@@ -29,6 +29,8 @@ export class Segment extends Model<InferAttributes<Segment>, InferCreationAttrib
   declare heightM: CreationOptional<number>;
   declare lengthM: number;
   declare assumed: CreationOptional<string[]>;
+  /** Attributes set by hand; a repeated import leaves them alone. */
+  declare edited: CreationOptional<string[]>;
   declare tags: CreationOptional<unknown>;
   declare retiredAt: CreationOptional<Date | null>;
   declare updatedAt: CreationOptional<Date>;
@@ -57,6 +59,7 @@ export function initSegment(sequelize: Sequelize): typeof Segment {
       heightM: { type: DataTypes.DOUBLE, allowNull: false, defaultValue: 0 },
       lengthM: { type: DataTypes.DOUBLE, allowNull: false },
       assumed: { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] },
+      edited: { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] },
       tags: { type: DataTypes.JSONB, allowNull: false, defaultValue: {} },
       retiredAt: { type: DataTypes.DATE },
       updatedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },

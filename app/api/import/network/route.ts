@@ -1,0 +1,41 @@
+import { previewNetworkImport } from '@/db/commands/preview-network-import';
+import { findLastMapping } from '@/db/queries/network-imports';
+import { UploadNetworkQuery, UploadNetworkReply } from '@/lib/contracts/network';
+import { suggestAttribution } from '@/lib/geo/attribution';
+import { type NetworkWarning } from '@/lib/geo/network';
+import { readGeoJson } from '@/lib/geo/read-geojson';
+import { Problem } from '@/lib/problem';
+import { handle } from '@/lib/server/handle';
+import { readFile } from './read-file';
+
+const guessedEncoding: NetworkWarning = {
+  kind: 'unreadable-tag',
+  sentence: 'The file is not UTF-8; it was read as Windows-1252. Check names with accents.',
+  sourceIds: [],
+  at: null,
+};
+
+/** Takes a file of roads as the body and keeps it as a preview; the network itself is not touched. */
+export const POST = handle(
+  { action: 'setup.roads', query: UploadNetworkQuery, reply: UploadNetworkReply },
+  async ({ request, query, actor }) => {
+    const { text, sha256, isGuessedEncoding } = await readFile(request);
+    const reading = readGeoJson(text);
+    if (!reading.ok) {
+      const [happened = '', ...todo] = reading.sentence.split(/(?<=[.!])\s+/);
+      throw new Problem('unreadable-file', { reason: happened, todo: todo.join(' ') });
+    }
+    const { lines, skipped, warnings } = reading;
+    const source = query.source ?? query.fileName.replace(/\.[^.]*$/, '').slice(0, 80);
+    return previewNetworkImport({
+      fileName: query.fileName,
+      sha256,
+      source,
+      attribution: query.attribution ?? suggestAttribution(lines),
+      mapping: await findLastMapping({ source }),
+      payload: { lines, skipped, warnings: isGuessedEncoding ? [...warnings, guessedEncoding] : warnings },
+      by: actor?.id ?? 0,
+      now: new Date(),
+    });
+  },
+);
