@@ -8,7 +8,7 @@ import { large, small } from './harvie-coefficients';
 import { massFractionFromSpecificGravity, salometerDegrees, specificGravity60F } from './hydrometer';
 import { icePointC } from './ice-point';
 import { eutecticOf, freezingPoint, massFractionAt, saturatedMassFractionAt } from './liquidus';
-import { brineToHold, filmAtRefreeze, iceMeltedPerKgSalt, saltToHold } from './melt';
+import { brineToHold, filmAtRefreeze, iceMeltedPerKgSalt, productToHold, saltToHold } from './melt';
 import { cationMixings, chloridePairs } from './pitzer-parameters';
 import { crystals } from './equilibrium-constants';
 import { massFractionToSaltPerWater, saltPerWaterOf, saltPerWaterToMassFraction, salts, type Salt } from './salts';
@@ -238,6 +238,30 @@ describe('melting and holding', () => {
     expect(brineToHold({ salt: 'NaCl', massFraction: 0.05 }, 500, -8)).toMatchObject({
       ok: false,
       reason: 'brine-too-weak',
+    });
+  });
+
+  it('holds with a product what its one salt would, and with a blend of the same total something between', () => {
+    const rate = (composition: Parameters<typeof productToHold>[0]['composition'], tempC = -8) => {
+      const result = productToHold({ composition, waterMassFraction: 0.77 }, 500, tempC);
+      return result.ok ? result.productGPerM2 : Number.NaN;
+    };
+    const brine = brineToHold({ salt: 'NaCl', massFraction: 0.23 }, 500, -8);
+    expect(brine.ok && brine.brineGPerM2).toBeCloseTo(rate({ NaCl: 0.23 }), 3);
+    const [salty, mixed, strong] = [rate({ NaCl: 0.23 }), rate({ NaCl: 0.13, MgCl2: 0.1 }), rate({ MgCl2: 0.23 })];
+    expect(mixed).toBeLessThan(salty);
+    expect(mixed).toBeGreaterThan(strong);
+    expect(productToHold({ composition: { NaCl: 0.05 }, waterMassFraction: 0.95 }, 500, -8)).toEqual({
+      ok: false,
+      reason: 'product-too-weak',
+    });
+    expect(productToHold({ composition: { NaCl: 0.97 }, waterMassFraction: 0 }, 500, -22)).toMatchObject({
+      ok: false,
+      reason: 'below-eutectic',
+    });
+    expect(productToHold({ composition: {}, waterMassFraction: 0 }, 500, -2)).toMatchObject({
+      reason: 'below-eutectic',
+      limitC: 0,
     });
   });
 

@@ -1,5 +1,6 @@
-import { massFractionAt, type MassFractionResult } from './liquidus';
-import { type Salt } from './salts';
+import { saltPerWaterOnIceBranch } from './ice-point';
+import { eutecticOf, massFractionAt, type MassFractionResult } from './liquidus';
+import { amountsOf, type Salt, type SaltPerWater } from './salts';
 
 type Refused = Extract<MassFractionResult, { ok: false }>;
 export type MeltResult = { readonly ok: true; readonly iceKgPerKgSalt: number } | Refused;
@@ -55,4 +56,35 @@ export function brineToHold(
     return { ok: false, reason: 'brine-too-weak', limitMassFraction: limit.massFraction };
   }
   return { ok: true, brineGPerM2: (waterGPerM2 * limit.massFraction) / (brine.massFraction - limit.massFraction) };
+}
+
+/** A product as delivered: kg of each anhydrous salt and of water per kg of it; what is left is inert. */
+export interface Product {
+  readonly composition: SaltPerWater;
+  readonly waterMassFraction: number;
+}
+
+export type HoldingProductResult =
+  | { readonly ok: true; readonly productGPerM2: number }
+  | Refused
+  /** It brings more water than its salt can keep unfrozen: it would freeze itself. */
+  | { readonly ok: false; readonly reason: 'product-too-weak' };
+
+/**
+ * g/m² of a product of one or several salts, solid or liquid, that keep `waterGPerM2` of other water unfrozen at a
+ * temperature in °C, nothing lost: `W / (Σ p_j/x°_j(T) − p_w)` by the Zdanovskii rule, with p_j kg of salt and p_w kg of
+ * water per kg of product and x°_j the strength of single brine j at its ice point, kg per kg water. A salt counts only down to its own eutectic, so the
+ * answer is on the careful side there. For one salt this is `W w_L/(w_b − w_L)`; 23 % NaCl, 500 g/m² at −8 °C: 518.5.
+ */
+export function productToHold(product: Product, waterGPerM2: number, tempC: number): HoldingProductResult {
+  if (!Number.isFinite(tempC)) throw new RangeError(`A temperature is a finite number of °C, not ${tempC}`);
+  if (tempC > 0) return { ok: false, reason: 'above-freezing', limitC: 0 };
+  const salts = amountsOf(product.composition);
+  const limitC = salts.reduce((coldest, { salt }) => Math.min(coldest, eutecticOf(salt).tempC), 0);
+  if (tempC < limitC) return { ok: false, reason: 'below-eutectic', limitC };
+  const held = salts
+    .filter(({ salt }) => tempC >= eutecticOf(salt).tempC)
+    .reduce((sum, { salt, saltPerWater }) => sum + saltPerWater / saltPerWaterOnIceBranch(salt, tempC), 0);
+  if (!(held > product.waterMassFraction)) return { ok: false, reason: 'product-too-weak' };
+  return { ok: true, productGPerM2: waterGPerM2 / (held - product.waterMassFraction) };
 }
