@@ -18,6 +18,8 @@ export default defineConfig({
         test: {
           name: 'unit',
           environment: 'node',
+          // Two busy cores stretch a second of arithmetic to many; a hang still ends.
+          testTimeout: 20_000,
           include: ['lib/**/*.test.ts', 'db/**/*.test.ts', 'tests/truth/**/*.test.ts', 'tests/house/**/*.test.ts'],
           setupFiles: ['tests/setup/no-console-error.ts'],
         },
@@ -28,6 +30,7 @@ export default defineConfig({
         test: {
           name: 'dom',
           environment: 'happy-dom',
+          testTimeout: 20_000,
           include: ['components/**/*.test.tsx', 'lib/client/**/*.test.tsx'],
           setupFiles: ['tests/setup/no-console-error.ts', 'tests/setup/msw.ts'],
         },

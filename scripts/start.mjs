@@ -1,6 +1,6 @@
 import { ensureBuild, servers } from './setup/build.mjs';
 import { clusterWatch } from './setup/cluster.mjs';
-import { demoSignIns } from './setup/demo-sign-ins.mjs';
+import { showDemoSignIns } from './setup/demo-sign-ins.mjs';
 import { loadLocalSettings, productEnvironment } from './setup/environment.mjs';
 import { takeLease } from './setup/leases.mjs';
 import { checkNodeVersion } from './setup/node-version.mjs';
@@ -110,7 +110,7 @@ async function main() {
   stopping.check();
   const { address, moveTo } = await startProcesses(database.url, dist);
   lease.change({ label, dist: isDev ? '' : dist, url: address.url });
-  await demoSignIns(database.url);
+  await showDemoSignIns(database.url);
   say(`\n  Ready after ${seconds(performance.now() - beganAt)}. Open  ${address.url}   (Ctrl-C stops it)\n`);
   await (database.server ? watchDatabase(database.url, moveTo) : stopping.promise);
 }
