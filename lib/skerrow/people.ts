@@ -129,7 +129,7 @@ export const trucks: readonly SkerrowTruck[] = [
     route: 'Ridge',
     driver: 'Marta Aldous',
     ...middling,
-    calibratedDaysBefore: 27,
+    calibratedDaysBefore: 212,
   },
   {
     number: 5,
