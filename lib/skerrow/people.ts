@@ -182,8 +182,8 @@ export interface SkerrowMaterial {
 }
 
 /**
- * What the yards hold. Bulk densities and brine densities at about 15 °C; lowest practical temperatures
- * are common practice, no source; prices invented.
+ * What the yards hold. Lowest practical temperatures as in `lib/treatment`: NaCl 15 °F (Wisconsin DOT, Salt
+ * Institute), MgCl2 5 °F, CaCl2 −25 °F (agency guides); bulk densities common practice, no source; prices invented.
  */
 export const materials: readonly SkerrowMaterial[] = [
   {
@@ -193,7 +193,7 @@ export const materials: readonly SkerrowMaterial[] = [
     waterMassFraction: 0.01,
     densityKgPerM3: 1280,
     costCentsPerTonne: 8200,
-    practicalMinimumC: -9,
+    practicalMinimumC: -9.4,
   },
   {
     name: 'Salt brine 23 %',
@@ -202,7 +202,7 @@ export const materials: readonly SkerrowMaterial[] = [
     waterMassFraction: 0.77,
     densityKgPerM3: 1176,
     costCentsPerTonne: 3100,
-    practicalMinimumC: -7,
+    practicalMinimumC: -9.4,
   },
   {
     name: 'Pre-wet salt 70:30',
@@ -211,7 +211,7 @@ export const materials: readonly SkerrowMaterial[] = [
     waterMassFraction: 0.238,
     densityKgPerM3: 1300,
     costCentsPerTonne: 6670,
-    practicalMinimumC: -12,
+    practicalMinimumC: -9.4,
     mixedFrom: { solid: 'Rock salt, dry', liquid: 'Salt brine 23 %', liquidMassFraction: 0.3 },
   },
   {
@@ -221,7 +221,7 @@ export const materials: readonly SkerrowMaterial[] = [
     waterMassFraction: 0.7,
     densityKgPerM3: 1283,
     costCentsPerTonne: 16500,
-    practicalMinimumC: -18,
+    practicalMinimumC: -15,
   },
   {
     name: 'Calcium chloride brine 32 %',
@@ -230,7 +230,7 @@ export const materials: readonly SkerrowMaterial[] = [
     waterMassFraction: 0.68,
     densityKgPerM3: 1315,
     costCentsPerTonne: 19800,
-    practicalMinimumC: -25,
+    practicalMinimumC: -31.7,
   },
   {
     name: 'Washed grit 3–6 mm',
