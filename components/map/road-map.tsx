@@ -5,7 +5,8 @@ import { type ReactNode } from 'react';
 import { MapContainer, TileLayer } from 'react-leaflet';
 import { classNames } from '@/components/ui/class-names';
 import { boundsOf } from './bounds';
-import { type MapBaseFeature, type MapSegment, type MapTruck } from './map-content';
+import { Focus } from './focus';
+import { type LatLon, type MapBaseFeature, type MapSegment, type MapTruck } from './map-content';
 import { Roads } from './roads';
 import { Trucks } from './trucks';
 import { ZoomButtons } from './zoom-buttons';
@@ -23,6 +24,8 @@ export type RoadMapProps = Readonly<{
   trucks?: readonly MapTruck[];
   /** A change of it fits the map to the roads again. */
   fitKey?: string | number;
+  /** A place to bring close and ring; another key shows it anew. */
+  focus?: Readonly<{ at: LatLon; key: string | number }> | null;
   /** Over the map, in its upper left corner. */
   legend?: ReactNode;
   /** Whose data are shown; nothing when empty. */
@@ -65,6 +68,7 @@ export function RoadMap(props: RoadMapProps) {
         {tileUrl ? <TileLayer url={tileUrl} opacity={0.4} /> : null}
         <Roads {...props} baseFeatures={baseFeatures} />
         <Trucks trucks={trucks} />
+        {props.focus ? <Focus key={props.focus.key} at={props.focus.at} /> : null}
         <ZoomButtons segments={segments} baseFeatures={baseFeatures} />
       </MapContainer>
       {legend ? <div className="pointer-events-none absolute top-3 left-3 z-[500]">{legend}</div> : null}
