@@ -1,4 +1,5 @@
 import { sweepSignInAttempts } from '@/db/commands/sweep-sign-in-attempts';
+import { demoWeather } from './demo-weather';
 
 export interface Job {
   queue: string;
@@ -10,4 +11,5 @@ export interface Job {
 
 export const jobs: readonly Job[] = [
   { queue: 'sweep-sign-in-attempts', schedule: '17 3 * * *', run: (now) => sweepSignInAttempts({ now }) },
+  { queue: 'demo-weather', schedule: '*/10 * * * *', run: demoWeather },
 ];
