@@ -35,7 +35,7 @@ export function BrineFigure({ className }: Readonly<{ className?: string }>) {
       {[0, -5, -10, -15, -20].map((tempC) => (
         <g key={tempC}>
           <path d={`M40 ${40 - tempC * 17}H530`} className="stroke-line" />
-          <text x="30" y={44 - tempC * 17} textAnchor="end" className="fill-faint font-mono text-sm">
+          <text x="30" y={44 - tempC * 17} textAnchor="end" className="fill-faint font-mono text-xs">
             {tempC === 0 ? '0' : `−${-tempC}`}
           </text>
         </g>
@@ -47,13 +47,13 @@ export function BrineFigure({ className }: Readonly<{ className?: string }>) {
       {[16.5, 14, 12, 10.4].map((percent) => (
         <circle key={percent} cx={40 + percent * 18} cy="142" r="4" className="fill-soft" />
       ))}
-      <text x="64" y="340" className="fill-frozen text-base">
+      <text x="64" y="340" className="fill-frozen text-sm">
         ice and brine
       </text>
-      <text x="330" y="84" className="fill-soft text-base">
+      <text x="330" y="84" className="fill-soft text-sm">
         all brine
       </text>
-      <text x="212" y="170" className="fill-urgent text-base">
+      <text x="196" y="170" textAnchor="end" className="fill-urgent text-sm">
         refreezes here
       </text>
       <circle cx={40 + 9.3 * 18} cy="142" r="7" className="fill-urgent" />

@@ -15,7 +15,8 @@ import { findPerson } from '@/db/queries/people';
 import { listPolicies } from '@/db/queries/policy';
 import { selectRows } from '@/db/transaction';
 import { SaveMaterialInput } from '@/lib/contracts/materials';
-import { PolicyRules } from '@/lib/contracts/policy';
+import { AdoptPolicyInput, PolicyRules, readPolicy } from '@/lib/contracts/policy';
+import { defaultPolicy } from '@/lib/treatment/policy';
 import { testDatabase, type TestDatabase } from '../setup/database';
 
 const now = new Date('2026-12-01T02:40:00Z');
@@ -187,16 +188,17 @@ describe('fleet', () => {
 });
 
 describe('policy', () => {
-  const rules = PolicyRules.parse({
-    marginMin: '15',
-    maxRateGPerM2: { solid: '40', prewet: '40', abrasive: '200' },
-    maxLiquidRateMlPerM2: '60',
-    classes: {
-      A: { promise: 'bare', cycleMin: '120' },
-      B: { promise: 'bare', cycleMin: '180' },
-      C: { promise: 'passable', cycleMin: '240' },
-      D: { promise: 'low', cycleMin: '480' },
-    },
+  const rules = PolicyRules.parse({ ...defaultPolicy, marginMin: '20' });
+
+  it('a version that names nothing reads as the default policy', () => {
+    expect(readPolicy({})).toEqual(defaultPolicy);
+    expect(readPolicy(rules).marginMin).toBe(20);
+  });
+
+  it('a least rate above the most is refused', () => {
+    const turned = { ...defaultPolicy, minRateGPerM2: { ...defaultPolicy.minRateGPerM2, solid: 50 } };
+    const answer = AdoptPolicyInput.safeParse({ basedOnVersion: 0, rules: turned });
+    expect(answer.error?.issues[0]?.path).toEqual(['rules', 'maxRateGPerM2', 'solid']);
   });
 
   it('is adopted in versions, and never over a version one has not seen', async () => {

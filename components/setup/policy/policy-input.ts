@@ -1,25 +1,23 @@
-import { serviceClasses } from '@/lib/contracts/policy';
+import { serviceClasses } from '@/lib/treatment/policy';
 
 type Typed = Readonly<Record<string, FormDataEntryValue>>;
 
-/** The flat fields of the form as the contract wants them. The cycle is typed in hours and kept in minutes. */
+const forms = ['liquid', 'prewet', 'solid'] as const;
+
+/** The flat fields of the form (`promises.A`, `scatter.solid`) as the contract wants them. */
 export function policyInput(typed: Typed, basedOnVersion: number) {
-  const cycle = (text: FormDataEntryValue | undefined) => {
-    const hours = String(text ?? '');
-    return hours.trim() === '' || Number.isNaN(Number(hours)) ? hours : Math.round(Number(hours) * 60);
-  };
+  const group = (name: string, keys: readonly string[]) =>
+    Object.fromEntries(keys.map((key) => [key, typed[`${name}.${key}`]]));
+  const single = Object.fromEntries(Object.entries(typed).filter(([name]) => !name.includes('.')));
   return {
     basedOnVersion,
     rules: {
-      marginMin: typed.marginMin,
-      maxRateGPerM2: { solid: typed.solid, prewet: typed.prewet, abrasive: typed.abrasive },
-      maxLiquidRateMlPerM2: typed.liquid,
-      classes: Object.fromEntries(
-        serviceClasses.map((name) => [
-          name,
-          { promise: typed[`promise.${name}`], cycleMin: cycle(typed[`cycle.${name}`]) },
-        ]),
-      ),
+      ...single,
+      promises: group('promises', serviceClasses),
+      vehiclesPerH: group('vehiclesPerH', serviceClasses),
+      maxRateGPerM2: group('maxRateGPerM2', forms),
+      minRateGPerM2: group('minRateGPerM2', forms),
+      scatter: group('scatter', forms),
     },
   };
 }

@@ -1,7 +1,7 @@
 import { type Metadata } from 'next';
 import { findAgency } from '@/db/queries/agency';
 import { listPolicies } from '@/db/queries/policy';
-import { PolicyRules } from '@/lib/contracts/policy';
+import { readPolicy } from '@/lib/contracts/policy';
 import { requirePage } from '@/lib/server/page';
 import { formatDateTime } from '@/lib/time/format';
 import { PolicyScreen } from './policy-screen';
@@ -12,11 +12,10 @@ export default async function PolicyPage() {
   await requirePage('setup.policy');
   const [policies, agency] = await Promise.all([listPolicies(), findAgency()]);
   const [inForce] = policies;
-  const rules = PolicyRules.safeParse(inForce?.rules);
   const versions = policies.map(({ version, adoptedAt, adoptedByName }) => ({
     version,
     adopted: formatDateTime(adoptedAt, agency.zone),
     by: adoptedByName,
   }));
-  return <PolicyScreen key={inForce?.version ?? 0} rules={rules.success ? rules.data : null} versions={versions} />;
+  return <PolicyScreen key={inForce?.version ?? 0} policy={readPolicy(inForce?.rules)} versions={versions} />;
 }

@@ -2,12 +2,11 @@
 
 import { PolicyForm } from '@/components/setup/policy/policy-form';
 import { useAnnounce } from '@/components/ui/announcements';
-import { Notice } from '@/components/ui/notice';
 import { PageBody, PageHeader } from '@/components/ui/page-header';
 import { Section } from '@/components/ui/section';
 import { Table } from '@/components/ui/table';
 import { useSubmission } from '@/components/ui/use-submission';
-import { type PolicyRules } from '@/lib/contracts/policy';
+import { type Policy } from '@/lib/treatment/policy';
 import { BackToSetup } from '../back';
 import { adoptPolicyAction } from './actions';
 
@@ -17,9 +16,9 @@ export interface PolicyVersion {
   by: string | null;
 }
 
-export type PolicyScreenProps = Readonly<{ rules: PolicyRules | null; versions: readonly PolicyVersion[] }>;
+export type PolicyScreenProps = Readonly<{ policy: Policy; versions: readonly PolicyVersion[] }>;
 
-export function PolicyScreen({ rules, versions }: PolicyScreenProps) {
+export function PolicyScreen({ policy, versions }: PolicyScreenProps) {
   const announce = useAnnounce();
   const submission = useSubmission(adoptPolicyAction, ({ version }) =>
     announce(`Version ${version} is in force. Plans already worked out keep theirs.`),
@@ -33,17 +32,7 @@ export function PolicyScreen({ rules, versions }: PolicyScreenProps) {
         facts={[inForce ? `Version ${inForce.version}, in force since ${inForce.adopted}` : 'None adopted yet']}
       />
       <PageBody className="max-w-5xl gap-10 lg:grid-cols-[minmax(0,1fr)_17rem]">
-        <div className="grid gap-6">
-          {inForce && !rules ? (
-            <Notice
-              tone="caution"
-              title={`Version ${inForce.version} was written by another release and cannot be shown here.`}
-              kept="It stays in force."
-              todo="Fill in every field to adopt a new version."
-            />
-          ) : null}
-          <PolicyForm rules={rules} basedOnVersion={inForce?.version ?? 0} submission={submission} />
-        </div>
+        <PolicyForm policy={policy} basedOnVersion={inForce?.version ?? 0} submission={submission} />
         <Section title="Versions">
           <Table
             caption="Versions of the policy"
