@@ -7,6 +7,8 @@ import { Wordmark } from '@/components/shell/mark';
 import { Notice } from '@/components/ui/notice';
 import { signInLimits } from '@/db/commands/sign-in';
 import { findAgency } from '@/db/queries/agency';
+import { findDemoSignIns } from '@/db/queries/demo-sign-ins';
+import { roleNames, type Role } from '@/lib/permissions';
 import { getActor } from '@/lib/server/session';
 import { SignInForm } from './sign-in-form';
 
@@ -21,8 +23,19 @@ function onwardsFrom(asked: string | string[] | undefined): string {
   return /^\/(?![/\\])/.test(path) && !path.startsWith('/sign-in') ? path : '/';
 }
 
+const withRoleName = ({ name, email, role }: { name: string; email: string; role: Role }) => ({
+  name,
+  email,
+  roleName: roleNames[role],
+});
+
 export default async function SignInPage({ searchParams }: Readonly<{ searchParams: Search }>) {
-  const [{ callbackUrl, changed }, actor, agency] = await Promise.all([searchParams, getActor(), findAgency()]);
+  const [{ callbackUrl, changed }, actor, agency, demo] = await Promise.all([
+    searchParams,
+    getActor(),
+    findAgency(),
+    findDemoSignIns(),
+  ]);
   const onwards = onwardsFrom(callbackUrl);
   if (actor) redirect(onwards as Route);
   return (
@@ -39,7 +52,11 @@ export default async function SignInPage({ searchParams }: Readonly<{ searchPara
           {changed === 'password' ? (
             <Notice tone="done" title="Your password is changed." todo="Sign in with the new one." />
           ) : null}
-          <SignInForm onwards={onwards} waitMin={signInLimits.windowMin} demo={null} />
+          <SignInForm
+            onwards={onwards}
+            waitMin={signInLimits.windowMin}
+            demo={demo && { password: demo.password, people: demo.people.map(withRoleName) }}
+          />
         </div>
         <p className="text-sm text-faint">
           Here for the roads, not the desk?{' '}

@@ -1,0 +1,2 @@
+/** The password of everybody of the demo; nowhere else is there one that is written down. */
+export const demoPassword = 'skerrow-demo';
