@@ -2,7 +2,7 @@ import { saltGPerM2, waterMmOf } from '../road/film';
 import { isSnowLike } from '../road/precipitation';
 import { chlorideShare, type Material } from './materials';
 import { type Caution } from './cautions';
-import { leastRate, passOverRoadOf, type LeastRateInput, type RateAnswer } from './least-rate';
+import { leastRate, passOverRoadOf, type HoldInput, type RateAnswer } from './least-rate';
 import { coldestC, isDryColdBlowing } from './rules';
 import { shorterCycle, type ShorterCycle } from './shorter-cycle';
 import { isKeptThrough, tryRate } from './trial';
@@ -18,7 +18,7 @@ export const treatmentActions = [
 ] as const;
 export type TreatmentAction = (typeof treatmentActions)[number];
 
-export interface ChoiceInput extends Omit<LeastRateInput, 'material' | 'isPloughed' | 'spreaderMaxGPerM2'> {
+export interface ChoiceInput extends Omit<HoldInput, 'isPloughed'> {
   /** products at hand, in any order */
   materials: readonly Material[];
   /** the most each form can be dosed by the trucks that come here, g/m²; null or absent: not known */
@@ -142,7 +142,7 @@ function fallback({ options, isPloughed, input }: Found): Decision {
 
 function decide(found: Found): Decision {
   const { options, isPloughed, input } = found;
-  const road = passOverRoadOf({ ...input, material: input.materials[0] ?? nothingAtHand, isPloughed });
+  const road = passOverRoadOf({ ...input, isPloughed });
   const untouched = { material: null, rateGPerM2: 0, scatter: 0 };
   const still: Decision = { ...undecided, action: isPloughed ? 'plough' : 'nothing' };
   if (isKeptThrough(tryRate(road, untouched))) return still;
@@ -150,17 +150,6 @@ function decide(found: Found): Decision {
   const option = best(options, input.isSensitive ?? false);
   return option ? salted(option, input.materials) : fallback(found);
 }
-
-const nothingAtHand: Material = {
-  id: '',
-  name: '',
-  form: 'abrasive',
-  composition: {},
-  waterMassFraction: 0,
-  densityKgPerM3: 1000,
-  practicalMinimumC: null,
-  costCentsPerTonne: 0,
-};
 
 function cautionsOf(decision: Decision, { options, input }: Found, coldest: number): Caution[] {
   const cautions: Caution[] = ['advice', 'pavement-not-air'];
@@ -191,7 +180,7 @@ export function chooseTreatment(input: ChoiceInput): Treatment {
   const options = answersOf(input, isPloughed);
   const found = { options, isPloughed, input };
   const decision = decide(found);
-  const { untilIndex } = passOverRoadOf({ ...input, material: nothingAtHand });
+  const { untilIndex } = passOverRoadOf(input);
   const nowMm = waterMmOf(input.film);
   const residualMm = input.parameters?.ploughResidualMm ?? 0.3;
   const coldest = coldestC(input.weather, untilIndex);

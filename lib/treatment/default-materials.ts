@@ -25,7 +25,7 @@ const saltBrine: Material = {
   waterMassFraction: 0.767,
   densityKgPerM3: 1178,
   practicalMinimumC: -9.4,
-  costCentsPerTonne: 2400,
+  costCentsPerTonne: 1900,
 };
 
 const calciumBrine: Material = {

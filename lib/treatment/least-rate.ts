@@ -7,19 +7,23 @@ import { forbid, type Refusal } from './rules';
 import { isKeptThrough, needAt, tryRate, type JudgedStep, type Need, type PassOverRoad } from './trial';
 import { type RoadWeather } from './weather';
 
-export interface LeastRateInput {
+/** A road, the pass over it now, and how long that has to last. */
+export interface HoldInput {
   /** what lies there now, before the pass */
   film: Film;
   weather: RoadWeather;
   /** to the next pass, min; the policy's margin comes on top */
   untilMin: number;
   promise: PromiseKind;
-  material: Material;
   policy: Policy;
   isPloughed?: boolean;
   parameters?: FilmParameters;
   vehiclesPerH?: number;
   windMPerS?: number | null;
+}
+
+export interface LeastRateInput extends HoldInput {
+  material: Material;
   /** what the truck's spreader can dose at most, g/m² of product; null when it is not known */
   spreaderMaxGPerM2?: number | null;
 }
@@ -50,7 +54,7 @@ export type RateAnswer = LeastRate | Refusal;
 /** More than any spreader doses, g/m²: what needs more is no question of rate. */
 const CEILING_G_PER_M2 = 2000;
 
-export function passOverRoadOf(input: LeastRateInput): PassOverRoad {
+export function passOverRoadOf(input: HoldInput): PassOverRoad {
   const { weather, policy } = input;
   const last = weather.tempsC.length - 1;
   const untilIndex = Math.min(last, Math.ceil((input.untilMin + policy.marginMin) / weather.stepMin - 1e-9));

@@ -29,7 +29,10 @@ export interface ProjectionInput {
  * all after it are NaN and `isKept` 0: unknown, not zero. `knownCount` is the number of entries before.
  */
 export interface Projection {
-  /** pavement temperature minus the freezing point of what lies there, °C; below 0 there is or will be ice */
+  /**
+   * Pavement temperature minus the freezing point of what lies there, °C; below 0 there is or will be ice. On a dry
+   * road (`waterMm` below `DRY_MM`) it is the pavement temperature: what a first drop of water would meet.
+   */
   freezeMarginC: Float32Array;
   /** share of what lies there that is brine, 0 to 1; 1 on a dry road */
   phi: Float32Array;

@@ -27,7 +27,7 @@ export function shorterCycle(
     if (!material || answer.ok || material.form === 'abrasive') continue;
     const { limit, neededRateGPerM2 } = answer;
     if (neededRateGPerM2 === undefined || limit === undefined) continue;
-    const road = passOverRoadOf({ ...input, material, isPloughed });
+    const road = passOverRoadOf({ ...input, isPloughed });
     const scatter = input.policy.scatter[material.form];
     const brokenIndex = firstBroken(tryRate(road, { material, rateGPerM2: limit, scatter }));
     if (brokenIndex === null) continue;
