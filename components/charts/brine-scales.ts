@@ -42,7 +42,9 @@ export function brineScales(content: BrineContent, frame: BrineFrame, system: Un
     clamp: true,
   });
   const y = scaleLinear<number>({ domain: [coldestC, warmestC], range: [frame.heightPx - frame.bottom, frame.top] });
-  const xTicks = [0, 0.05, 0.1, 0.15, 0.2, 0.25, 0.3, 0.35, 0.4].filter((tick) => tick <= strongest);
+  const xTicks = [0, 0.05, 0.1, 0.15, 0.2, 0.25, 0.3, 0.35, 0.4].filter(
+    (tick) => tick <= strongest && x(tick) < frame.widthPx - 52,
+  );
   return { x, y, xTicks, yTicks: temperatureTicks(coldestC, warmestC, system), coldestC };
 }
 

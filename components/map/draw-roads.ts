@@ -13,7 +13,7 @@ export interface View {
   readonly zoom: number;
 }
 
-/** The visible paths in px, without points that would fall on the same pixel: kept until the view changes. */
+/** The visible paths in px, without points that would not show: kept until the view changes. */
 export interface GlassPaths {
   readonly points: Float32Array;
   /** Path i: `spans[2i]` to `spans[2i + 1]`, in numbers of `points`; equal when out of view. */
@@ -39,6 +39,9 @@ export function projectPaths(paths: WorldPaths, view: View): GlassPaths {
   return { points, spans };
 }
 
+/** A line drawn without a point strays this much at most. */
+const STRAY_PX = 0.6;
+
 function projectPath(
   paths: WorldPaths,
   view: View,
@@ -48,18 +51,11 @@ function projectPath(
   const first = paths.starts[into.path] ?? 0;
   const last = (paths.starts[into.path + 1] ?? 0) - 1;
   let used = into.used;
-  let lastX = -1e9;
-  let lastY = -1e9;
   for (let index = first; index <= last; index += 1) {
-    const x = (paths.xs[index] ?? 0) * view.scale - view.originX;
-    const y = (paths.ys[index] ?? 0) * view.scale - view.originY;
-    const isEnd = index === first || index === last;
-    if (!isEnd && Math.abs(x - lastX) + Math.abs(y - lastY) < 1.5) continue;
-    points[used] = x;
-    points[used + 1] = y;
+    if ((paths.weights[index] ?? 0) * view.scale < STRAY_PX) continue;
+    points[used] = (paths.xs[index] ?? 0) * view.scale - view.originX;
+    points[used + 1] = (paths.ys[index] ?? 0) * view.scale - view.originY;
     used += 2;
-    lastX = x;
-    lastY = y;
   }
   return used;
 }
@@ -110,16 +106,16 @@ export function drawRoads(
   pen.lineCap = 'round';
   pen.lineJoin = 'round';
   drawHalo(pen, roads, { ...given, factor });
-  batches(roads).forEach((paths, key) => {
+  const lists = batches(roads);
+  const isGlowing = glowingCount(lists, classCount) <= MOST_GLOWING;
+  lists.forEach((paths, key) => {
     const style = roadLooks[roadStyles[Math.floor(key / classCount)] ?? 'unknown'];
     const widthPx = (roads.classes.widths[key % classCount] ?? otherClassWidthPx) * style.widthFactor * factor;
     pen.strokeStyle = given.palette[style.token] ?? '';
-    pen.beginPath();
-    for (const path of paths) tracePath(pen, roads.glass, path);
-    if (style.glow > 0) {
+    if (isGlowing && style.glow > 0) {
       pen.globalAlpha = style.glow;
       pen.lineWidth = widthPx + 7 * factor;
-      pen.stroke();
+      strokePaths(pen, roads.glass, paths);
       pen.globalAlpha = 1;
     }
     pen.lineWidth = widthPx;
@@ -127,10 +123,33 @@ export function drawRoads(
       pen.lineCap = 'butt';
       pen.setLineDash([3.2 + widthPx * 0.9, 1.6 + widthPx * 0.55]);
     }
-    pen.stroke();
+    strokePaths(pen, roads.glass, paths);
     pen.setLineDash([]);
     pen.lineCap = 'round';
   });
+}
+
+/** Where everything is in trouble nothing stands out by a glow, and glow is what costs most to draw. */
+const MOST_GLOWING = 300;
+
+function glowingCount(lists: readonly number[][], classCount: number): number {
+  let count = 0;
+  lists.forEach((paths, key) => {
+    if (roadLooks[roadStyles[Math.floor(key / classCount)] ?? 'unknown'].glow > 0) count += paths.length;
+  });
+  return count;
+}
+
+/** A few dozen roads a stroke: one stroke of thousands is slow to fill, thousands of strokes are slow to start. */
+const PATHS_PER_STROKE = 32;
+
+function strokePaths(pen: CanvasRenderingContext2D, glass: GlassPaths, paths: readonly number[]): void {
+  for (let from = 0; from < paths.length; from += PATHS_PER_STROKE) {
+    pen.beginPath();
+    const until = Math.min(paths.length, from + PATHS_PER_STROKE);
+    for (let at = from; at < until; at += 1) tracePath(pen, glass, paths[at] ?? 0);
+    pen.stroke();
+  }
 }
 
 /** A light ring under the chosen road and a thinner one under those pointed at. */

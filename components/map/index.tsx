@@ -8,4 +8,4 @@ export const RoadMap = dynamic(() => import('./road-map').then((module) => modul
   loading: () => <p className="grid h-full place-items-center bg-sea text-soft">Drawing the map</p>,
 });
 
-export { type RoadMapProps } from './road-map';
+export type { RoadMapProps } from './road-map';

@@ -33,8 +33,6 @@ export class RoadLayer extends L.Layer {
   private drawnCentre: L.LatLng | null = null;
   private frame = 0;
   private stopWatching: () => void = () => undefined;
-  /** How long the last drawing of the roads took, ms: for measuring. */
-  lastDrawMs = 0;
 
   override onAdd(map: L.Map): this {
     this.glassMap = map;
@@ -153,8 +151,7 @@ export class RoadLayer extends L.Layer {
     pen.clearRect(0, 0, view.widthPx, view.heightPx);
     drawRoads(pen, { glass, styles, classes, selected, highlighted }, { palette: this.colours(), zoom: view.zoom });
     drawPlaces(pen, this.base, { palette: this.colours(), view });
-    this.lastDrawMs = performance.now() - startedAt;
-    this.fire('drawn', { ms: this.lastDrawMs });
+    performance.measure('roads drawn', { start: startedAt });
   }
 
   private colours(): Palette {

@@ -9,6 +9,11 @@ export interface WorldPaths {
   readonly ys: Float64Array;
   /** Points of path i are `starts[i]` up to `starts[i + 1]`. */
   readonly starts: Uint32Array;
+  /**
+   * How far the line would stray without this point, world units (Douglas and Peucker); Infinity at the ends. What
+   * strays less than a pixel need not be drawn.
+   */
+  readonly weights: Float64Array;
   /** minX, minY, maxX, maxY of each path. */
   readonly boxes: Float64Array;
   readonly count: number;
@@ -46,7 +51,34 @@ export function toWorld(paths: readonly (readonly LatLon[])[]): WorldPaths {
     }
     boxes.set(box, index * 4);
   });
-  return { xs, ys, starts, boxes, count: paths.length };
+  const weights = new Float64Array(total).fill(Infinity);
+  for (let path = 0; path < paths.length; path += 1) {
+    weigh({ xs, ys, weights }, starts[path] ?? 0, (starts[path + 1] ?? 0) - 1);
+  }
+  return { xs, ys, starts, weights, boxes, count: paths.length };
+}
+
+/** The point that strays most between two others gets that distance as its weight; then the same on either side. */
+function weigh(line: Pick<WorldPaths, 'xs' | 'ys' | 'weights'>, first: number, last: number): void {
+  const spans: [number, number, number][] = [[first, last, Infinity]];
+  for (let span = spans.pop(); span; span = spans.pop()) {
+    const [from, to, most] = span;
+    if (to - from < 2) continue;
+    const at = (index: number) => [line.xs[index] ?? 0, line.ys[index] ?? 0] as const;
+    let farthest = from + 1;
+    let best = -1;
+    for (let index = from + 1; index < to; index += 1) {
+      const distance = squaredDistance(at(index), at(from), at(to));
+      if (distance > best) {
+        best = distance;
+        farthest = index;
+      }
+    }
+    // No point may outweigh the one that parted its span, or it would be drawn without it.
+    const weight = Math.min(most, Math.sqrt(best));
+    line.weights[farthest] = weight;
+    spans.push([from, farthest, weight], [farthest, to, weight]);
+  }
 }
 
 /** Square of the distance from a point to a stretch of line, in the unit of its arguments. */

@@ -48,7 +48,12 @@ export function ChosenRoad(props: ChosenRoadProps) {
       </header>
       {treatment ? (
         <>
-          <Rate treatment={treatment} />
+          <div className="flex items-start justify-between gap-4">
+            <Rate treatment={treatment} />
+            <Button size="small" onClick={openWhy} aria-haspopup="dialog">
+              Why
+            </Button>
+          </div>
           <p className="text-soft">
             {treatment.reason}{' '}
             {treatment.isPublished ? null : <span className="text-ink">Draft for pass {treatment.passNumber}.</span>}
@@ -57,24 +62,17 @@ export function ChosenRoad(props: ChosenRoadProps) {
       ) : (
         <div className="text-soft">{noPlan}</div>
       )}
-      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 text-sm">
-        <p className="flex flex-wrap items-center gap-x-3 text-soft">
-          <Tag tone={road.band === 'unknown' ? 'plain' : road.band}>{bandWords[road.band]}</Tag>
-          {road.band === 'unknown' ? (
-            <span>No current data. Do not treat as clear.</span>
-          ) : (
-            <span>
-              margin <Figure value={road.freezeMarginC} quantity="temperatureDifference" signed size="inline" />
-            </span>
-          )}
-          <span>{lastInWords(last, { zone, nowAt })}</span>
-        </p>
-        {treatment ? (
-          <Button size="small" onClick={openWhy} aria-haspopup="dialog">
-            Why
-          </Button>
-        ) : null}
-      </div>
+      <p className="flex flex-wrap items-center gap-x-3 text-sm text-soft">
+        <Tag tone={road.band === 'unknown' ? 'plain' : road.band}>{bandWords[road.band]}</Tag>
+        {road.band === 'unknown' ? (
+          <span>No current data. Do not treat as clear.</span>
+        ) : (
+          <span>
+            margin <Figure value={road.freezeMarginC} quantity="temperatureDifference" signed size="inline" />
+          </span>
+        )}
+        <span>{lastInWords(last, { zone, nowAt })}</span>
+      </p>
       {brine ? <BrineChart content={brine} zone={zone} /> : null}
       {treatment && why ? (
         <WhySheet

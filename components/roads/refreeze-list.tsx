@@ -40,7 +40,7 @@ export function RefreezeList({
       <header className="flex items-baseline gap-2 border-b px-4 py-2">
         <h2 className="flex-1 font-bold">Refreezes first</h2>
         {['hold', 'next pass', 'slack'].map((word) => (
-          <span key={word} aria-hidden className="w-[3.4rem] text-right text-sm text-soft">
+          <span key={word} aria-hidden className="w-[3.75rem] text-right text-sm whitespace-nowrap text-soft">
             {word}
           </span>
         ))}

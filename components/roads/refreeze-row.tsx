@@ -20,7 +20,7 @@ const barSpanMin = 180;
 /** One road: name, hold, next pass and slack; under them the bar and what else tells roads apart. */
 export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: RefreezeRowProps) {
   const isLate = road.slackMin !== null && road.slackMin < 0;
-  const figure = 'w-[3.4rem] text-right font-mono whitespace-nowrap';
+  const figure = 'w-[3.75rem] text-right font-mono whitespace-nowrap';
   return (
     <li className="[contain-intrinsic-size:auto_3.75rem] [content-visibility:auto]">
       <button

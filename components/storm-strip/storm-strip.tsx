@@ -124,7 +124,7 @@ export function StormStrip(props: StormStripProps) {
           className="absolute inset-0 block"
         >
           <Hatches />
-          <NowDivider content={content} frame={frame} scales={scales} />
+          <NowDivider content={content} frame={frame} scales={scales} cursorAt={cursorAt} />
           <TemperatureAxis frame={frame} scales={scales} system={system} />
           <Precipitation content={content} frame={frame} scales={scales} />
           <Temperature content={content} frame={frame} scales={scales} />

@@ -40,10 +40,12 @@ export function TimeAxis({ content, frame, scales, zone }: LayerProps & { zone: 
 }
 
 /** What is behind us lies on raised ground; a line and two words say where the forecast takes over. */
-export function NowDivider({ content, frame, scales }: LayerProps) {
+export function NowDivider({ content, frame, scales, cursorAt }: LayerProps & { cursorAt: number }) {
   const x = scales.x(content.nowAt);
   if (content.nowAt <= content.fromAt) return null;
   const floor = frame.heightPx - frame.bottom;
+  // The head of the cursor would cover the words: they step aside.
+  const aside = Math.abs(scales.x(cursorAt) - x) < 96 ? 38 + Math.abs(scales.x(cursorAt) - x) : 6;
   const isRunning = content.nowAt < content.untilAt;
   return (
     <g>
@@ -57,10 +59,10 @@ export function NowDivider({ content, frame, scales }: LayerProps) {
       {isRunning ? (
         <>
           <line x1={x} x2={x} y1={4} y2={floor} className="stroke-faint" />
-          <text x={x - 6} y={14} textAnchor="end" className="fill-soft text-xs">
+          <text x={x - aside} y={14} textAnchor="end" className="fill-soft text-xs">
             measured
           </text>
-          <text x={x + 6} y={14} className="fill-soft text-xs">
+          <text x={x + aside} y={14} className="fill-soft text-xs">
             forecast
           </text>
         </>
