@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button';
 import { Sheet } from '@/components/ui/dialog';
 import { Segmented } from '@/components/ui/segmented';
 import { highestLoadKg } from '@/lib/ledger/limits';
-import { type CabMaterialChoice } from './rate-sheet';
+import { MaterialChoice, type CabMaterialChoice } from './material-choice';
 import { Stepper } from './stepper';
 
 export type LoadSheetProps = Readonly<{
@@ -37,13 +37,7 @@ export function LoadSheet({ yards, materials, hopperKg, leftKg, onClose, onSave 
           value={String(yardId)}
           onChange={(value) => setYardId(Number(value))}
         />
-        <Segmented
-          label="Material"
-          size="cab"
-          options={materials.map((choice) => ({ value: String(choice.id), label: choice.name }))}
-          value={String(materialId)}
-          onChange={(value) => setMaterialId(Number(value))}
-        />
+        <MaterialChoice materials={materials} value={materialId} onChange={setMaterialId} />
         <Stepper
           label="Load"
           value={massKg}

@@ -3,18 +3,10 @@
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Sheet } from '@/components/ui/dialog';
-import { Segmented } from '@/components/ui/segmented';
 import { type RunRoad } from '@/lib/contracts/runs';
-import { highestRateGPerM2 } from '@/lib/ledger/limits';
-import { rateToleranceFraction } from '@/lib/ledger/limits';
+import { highestRateGPerM2, rateToleranceFraction } from '@/lib/ledger/limits';
+import { MaterialChoice, type CabMaterialChoice } from './material-choice';
 import { Stepper } from './stepper';
-
-export interface CabMaterialChoice {
-  id: number;
-  name: string;
-  form: 'solid' | 'prewet' | 'liquid' | 'abrasive';
-  densityKgPerM3: number;
-}
 
 export type RateSheetProps = Readonly<{
   road: RunRoad;
@@ -45,13 +37,7 @@ export function RateSheet({ road, materials, maxRateGPerM2, isCorrection, onClos
       }
     >
       <div className="mx-auto grid max-w-2xl gap-6">
-        <Segmented
-          label="Material"
-          size="cab"
-          options={materials.map((choice) => ({ value: String(choice.id), label: choice.name }))}
-          value={String(materialId)}
-          onChange={(value) => setMaterialId(Number(value))}
-        />
+        <MaterialChoice materials={materials} value={materialId} onChange={setMaterialId} />
         <Stepper
           label="Rate"
           value={isLiquid ? rateGPerM2 * mLPerGram : rateGPerM2}

@@ -24,29 +24,6 @@ export async function listCabTrucks(): Promise<CabTruck[]> {
   );
 }
 
-export interface RouteSummary {
-  id: number;
-  name: string;
-  yardName: string;
-  truckNumber: number | null;
-  roads: number;
-  laneKm: number;
-}
-
-export async function listRouteSummaries(): Promise<RouteSummary[]> {
-  return selectRows<RouteSummary>(
-    `select r.id, r.name, y.name as "yardName", t.number as "truckNumber", count(g.id)::int as roads,
-            coalesce(sum(g.length_m * g.lanes) / 1000, 0) as "laneKm"
-       from routes r
-       join yards y on y.id = r.yard_id
-       left join trucks t on t.id = r.truck_id
-       left join route_segments rs on rs.route_id = r.id
-       left join segments g on g.id = rs.segment_id and g.retired_at is null
-      where r.is_active
-      group by r.id, y.name, t.number order by r.name`,
-  );
-}
-
 export interface RoadChoice {
   id: number;
   name: string;

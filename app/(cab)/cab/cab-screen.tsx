@@ -5,7 +5,7 @@ import { signOut } from 'next-auth/react';
 import Link from 'next/link';
 import { useCallback, useState } from 'react';
 import { CabHeader } from '@/components/cab/cab-header';
-import { type CabMaterialChoice } from '@/components/cab/rate-sheet';
+import { type CabMaterialChoice } from '@/components/cab/material-choice';
 import { type RoadChoiceView } from '@/components/cab/road-picker';
 import { TakeRun, type RouteChoice, type TruckChoice } from '@/components/cab/take-run';
 import { Button } from '@/components/ui/button';

@@ -1,4 +1,5 @@
-import { listCabMaterials, listCabTrucks, listCabYards, listRoadChoices, listRouteSummaries } from '@/db/queries/cab';
+import { listCabMaterials, listCabTrucks, listCabYards, listRoadChoices } from '@/db/queries/cab';
+import { listRoutes } from '@/db/queries/routes';
 import { findAgency } from '@/db/queries/agency';
 import { findOpenRunOf } from '@/db/queries/runs';
 import { requirePage } from '@/lib/server/page';
@@ -12,7 +13,7 @@ export default async function CabPage() {
     findAgency(),
     findOpenRunOf({ driverId: actor.id }),
     listCabTrucks(),
-    listRouteSummaries(),
+    listRoutes(),
     listRoadChoices(),
     listCabMaterials(),
     listCabYards(),
@@ -23,7 +24,7 @@ export default async function CabPage() {
       zone={agency.zone}
       openRunId={open?.id ?? null}
       trucks={trucks}
-      routes={routes}
+      routes={routes.map((route) => ({ ...route, roads: route.segmentIds.length }))}
       roads={roads}
       materials={materials}
       yards={yards}
