@@ -71,7 +71,13 @@ export async function signIn(page: Page, { email, password }: Person): Promise<v
   await form.locator('input[name="email"]').fill(email);
   await form.locator('input[name="password"]').fill(password);
   await form.locator('button[type="submit"]').click();
-  await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
+  const refusal = form.getByRole('alert');
+  const refused = refusal.waitFor().then(async () => {
+    throw new Error(`${email} was refused: ${await refusal.innerText()}`);
+  });
+  // The one that loses the race ends with the page, and nobody is to hear of it.
+  refused.catch(() => undefined);
+  await Promise.race([page.waitForURL((url) => !url.pathname.startsWith('/sign-in')), refused]);
 }
 
 /** What axe finds against WCAG 2.2 AA, one line a finding; nothing found is an empty list. */
