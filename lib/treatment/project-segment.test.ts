@@ -68,7 +68,7 @@ describe('a road through time', () => {
 
   it('shares lie from 0 to 1, water is never negative, and margin and share agree on ice', () => {
     const result = project([pass(0, 20), pass(18, 30), pass(40, 25)]);
-    expect(result.knownCount).toBe(60);
+    expect(result.knownUntil).toBe(60);
     for (let index = 0; index < 60; index += 1) {
       const phi = result.phi[index] ?? NaN;
       expect(phi).toBeGreaterThanOrEqual(0);
@@ -92,9 +92,18 @@ describe('a road through time', () => {
     const tempsC = Float64Array.from(snowfall.tempsC, (temp, index) => (index < 12 ? temp : NaN));
     const weather = { ...snowfall, tempsC };
     const result = projectSegment({ film: plainFilm(), weather, passes: [], parameters, vehiclesPerH: 0, promise });
-    expect(result.knownCount).toBe(12);
+    expect(result.knownUntil).toBe(12);
     expect(result.freezeMarginC[12]).toBeNaN();
     expect(result.isKept[12]).toBe(0);
+  });
+
+  it('a road begins where its temperature is first known', () => {
+    const tempsC = Float64Array.from(snowfall.tempsC, (temp, index) => (index < 12 ? NaN : temp));
+    const weather = { ...snowfall, tempsC };
+    const result = projectSegment({ film: plainFilm(), weather, passes: [], parameters, vehiclesPerH: 0, promise });
+    expect([result.knownFrom, result.knownUntil]).toEqual([12, 60]);
+    expect(result.phi[11]).toBeNaN();
+    expect(result.waterMm[14]).toBeCloseTo(0.2, 6);
   });
 
   it('hands back the film before the pass at an entry, and leaves the one given alone', () => {

@@ -25,8 +25,9 @@ export interface ProjectionInput {
 }
 
 /**
- * One road through time, an entry a step. Where the pavement temperature is not known (NaN in `tempsC`), that entry and
- * all after it are NaN and `isKept` 0: unknown, not zero. `knownCount` is the number of entries before.
+ * One road through time, an entry a step, from `knownFrom` up to and without `knownUntil`. Before the first known
+ * pavement temperature (NaN in `tempsC` means unknown), and from the first gap after it on, entries are NaN and `isKept`
+ * 0: unknown, not zero.
  */
 export interface Projection {
   /**
@@ -43,7 +44,8 @@ export interface Projection {
   targetPhi: Float32Array;
   /** 1 while the promise is kept */
   isKept: Uint8Array;
-  knownCount: number;
+  knownFrom: number;
+  knownUntil: number;
   filmAt: Film | null;
 }
 
@@ -59,7 +61,8 @@ function emptyProjection(count: number): Projection {
     brineMassFraction: unknown(),
     targetPhi: unknown(),
     isKept: new Uint8Array(count),
-    knownCount: 0,
+    knownFrom: 0,
+    knownUntil: 0,
     filmAt: null,
   };
 }
@@ -97,8 +100,12 @@ export function projectSegment(input: ProjectionInput): Projection {
   let nextPass = 0;
   for (let index = 0; index < count; index += 1) {
     const tempC = tempsC[index] ?? NaN;
-    if (Number.isNaN(tempC)) break;
-    if (index === 0) settle(film, { tempC, durationMin: Infinity }, parameters);
+    if (Number.isNaN(tempC)) {
+      if (result.knownUntil > 0) break;
+      result.knownFrom = index + 1;
+      continue;
+    }
+    if (index === result.knownFrom) settle(film, { tempC, durationMin: Infinity }, parameters);
     else {
       const precipitationType = precipitationTypes[index] ?? 'none';
       advanceFilm(film, { ...step, tempC, precipitationMm: precipitationMm[index] ?? 0, precipitationType }, context);
@@ -109,7 +116,7 @@ export function projectSegment(input: ProjectionInput): Projection {
       nextPass += 1;
     }
     note(result, index, { film, tempC, promise });
-    result.knownCount = index + 1;
+    result.knownUntil = index + 1;
   }
   return result;
 }
@@ -119,11 +126,11 @@ export function projectSegment(input: ProjectionInput): Projection {
  * 0 when it is broken at once. `graceMin` leaves out what a fresh salt needs to work.
  */
 export function holdMin(
-  projection: Pick<Projection, 'isKept' | 'knownCount'>,
+  projection: Pick<Projection, 'isKept' | 'knownUntil'>,
   from: { index: number; stepMin: number; graceMin?: number },
 ): number | null {
   const first = from.index + Math.ceil((from.graceMin ?? 0) / from.stepMin);
-  for (let index = first; index < projection.knownCount; index += 1) {
+  for (let index = first; index < projection.knownUntil; index += 1) {
     if (!projection.isKept[index]) return index === first && from.graceMin ? 0 : (index - from.index) * from.stepMin;
   }
   return null;
