@@ -8,7 +8,7 @@ import { curveOf } from '../road/partition';
  * there and `φ` the brine share promised. Below 0 exactly when the promise is broken, once heat has had its time.
  *
  * Salts other than NaCl count by the NaCl strength of the same freezing point (within 0.3 °C for CaCl2 and MgCl2).
- * −5 °C, margin −4.08 °C (1.55 % NaCl), target 0.16: +1.33. NaN in, NaN out: not known stays not known.
+ * −5 °C, margin −4.08 °C (1.55 % NaCl), target 0.16: +1.36. NaN in, NaN out: not known stays not known.
  */
 export function promiseMarginC(at: { tempC: number; freezeMarginC: number; targetPhi: number }): number {
   const { tempC, freezeMarginC, targetPhi } = at;
