@@ -49,6 +49,6 @@ describe('the curves', () => {
   });
 
   it('write formulas with low digits but for the count of waters', () => {
-    expect(writeFormula('MgCl2·12H2O')).toBe('MgCl₂·12H₂O');
+    expect(writeFormula('MgCl2·12H2O')).toBe('MgCl₂\u202F\u22C5\u202F12H₂O');
   });
 });

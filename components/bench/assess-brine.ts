@@ -1,4 +1,4 @@
-import { expectedFreezingError, type ExpectedError } from '@/lib/brine/accuracy';
+import { expectedFreezingError, expectedSaltPointError, type ExpectedError } from '@/lib/brine/accuracy';
 import { brineDensityKgPerM3 } from '@/lib/brine/density';
 import {
   massFractionFromSpecificGravity,
@@ -67,7 +67,8 @@ export function assessBrine(question: BrineQuestion): Assessment {
     massFraction,
     strengthError: question.by === 'reading' ? readingError[salt] : 0,
     freezing,
-    error: expectedFreezingError(salt, freezing.freezingPointC),
+    error:
+      freezing.solid === 'ice' ? expectedFreezingError(salt, freezing.freezingPointC) : expectedSaltPointError(salt),
     isPastEutectic: massFraction > eutecticOf(salt).massFraction,
     densityAt60FKgPerM3: density.ok ? density.densityKgPerM3 : null,
     specificGravity: specificGravity60F(salt, massFraction),

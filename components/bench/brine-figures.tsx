@@ -10,7 +10,7 @@ export type BrineFiguresProps = Readonly<{ brine: AssessedBrine }>;
 export function BrineFigures({ brine }: BrineFiguresProps) {
   const { freezing, error, strengthError } = brine;
   return (
-    <dl className="flex flex-wrap gap-x-10 gap-y-4" aria-live="polite">
+    <dl className="flex flex-wrap gap-x-8 gap-y-4" aria-live="polite">
       <FigureBlock
         label="Strength"
         beside={
@@ -43,7 +43,8 @@ export function BrineFigures({ brine }: BrineFiguresProps) {
       </FigureBlock>
       <FigureBlock
         label="First solid"
-        beside={freezing.solid === 'ice' ? 'water freezes out, the rest grows stronger' : solidName(freezing.solid)}
+        className="min-w-0 flex-1 basis-44"
+        beside={freezing.solid === 'ice' ? 'the brine left over grows stronger' : solidName(freezing.solid)}
       >
         {freezing.solid === 'ice' ? 'ice' : writeFormula(freezing.solid)}
       </FigureBlock>

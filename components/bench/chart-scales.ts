@@ -9,12 +9,14 @@ export interface ChartFrame {
   readonly right: number;
   readonly top: number;
   readonly bottom: number;
+  /** No room for names in full. */
+  readonly isNarrow: boolean;
 }
 
 /** Room for the figures of the axes. */
 export function frameOf(width: number): ChartFrame {
   const height = Math.max(320, Math.min(470, Math.round(width * 0.78)));
-  return { width, height, left: 40, right: width - 12, top: 26, bottom: height - 44 };
+  return { width, height, left: 40, right: width - 12, top: 26, bottom: height - 44, isNarrow: width < 460 };
 }
 
 const COLDEST_C = -54;

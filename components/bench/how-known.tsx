@@ -10,7 +10,7 @@ export function HowKnown({ brine }: HowKnownProps) {
     <div className="grid gap-2 text-soft">
       <p>
         Freezing point: Pitzer model with the low-temperature parameters of Toner and Catling 2017.{' '}
-        {error === null ? (
+        {brine === null ? null : error === null ? (
           'This salt was not scored against a published table.'
         ) : (
           <>

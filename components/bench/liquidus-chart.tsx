@@ -7,11 +7,12 @@ import { formatNumber, formatQuantity } from '@/lib/units/format';
 import { unitLabel } from '@/lib/units/quantity';
 import { frameOf, scalesOf, type ChartFrame, type ChartScales } from './chart-scales';
 import { curveOf, type Curve, type CurvePoint } from './curves';
+import { writeFormula } from './solid-name';
 import { useWidth } from './use-width';
 
 export type LiquidusChartProps = Readonly<{
   salt: Salt;
-  brine: { massFraction: number; freezingPointC: number } | null;
+  brine: { massFraction: number; freezingPointC: number; isPastEutectic: boolean } | null;
   roadC: number;
 }>;
 
@@ -67,7 +68,9 @@ function Axes({ frame, scales }: Readonly<{ frame: ChartFrame; scales: ChartScal
   );
 }
 
-function SaltCurve({ curve, scales, isChosen }: Readonly<{ curve: Curve; scales: ChartScales; isChosen: boolean }>) {
+type SaltCurveProps = Readonly<{ curve: Curve; frame: ChartFrame; scales: ChartScales; isChosen: boolean }>;
+
+function SaltCurve({ curve, frame, scales, isChosen }: SaltCurveProps) {
   const { dx, dy, anchor } = names[curve.salt];
   const end = { x: scales.x(curve.eutectic.massFraction), y: scales.y(curve.eutectic.tempC) };
   const at = {
@@ -95,30 +98,53 @@ function SaltCurve({ curve, scales, isChosen }: Readonly<{ curve: Curve; scales:
         textAnchor={anchor}
         className={`text-[13px] ${rimmed} ${isChosen ? 'fill-ink font-semibold' : 'fill-soft'}`}
       >
-        {saltName[curve.salt]}
+        {frame.isNarrow ? writeFormula(curve.salt) : saltName[curve.salt]}
       </text>
     </g>
   );
 }
 
-function RoadLine({ roadC, frame, scales }: Readonly<{ roadC: number; frame: ChartFrame; scales: ChartScales }>) {
+/** What the dashed part of the chosen curve is. */
+function SaltBranchName({ curve, scales }: Readonly<{ curve: Curve; scales: ChartScales }>) {
+  const middle = curve.salts[Math.floor(curve.salts.length / 2)];
+  if (middle === undefined) return null;
+  return (
+    <text
+      x={scales.x(middle.massFraction) - 9}
+      y={scales.y(middle.tempC) + 4}
+      textAnchor="end"
+      className={`fill-soft text-[13px] ${rimmed}`}
+    >
+      salt separates
+    </text>
+  );
+}
+
+type RoadProps = Readonly<{ roadC: number; frame: ChartFrame; scales: ChartScales }>;
+
+function RoadLine({ roadC, frame, scales }: RoadProps) {
+  const y = scales.y(roadC);
+  if (y < frame.top || y > frame.bottom) return null;
+  return (
+    <path
+      d={`M${frame.left} ${y}H${frame.right}`}
+      strokeDasharray="1 5"
+      strokeLinecap="round"
+      strokeWidth={2}
+      className="stroke-soft"
+    />
+  );
+}
+
+function RoadName({ roadC, frame, scales }: RoadProps) {
   const system = useUnits();
   const y = scales.y(roadC);
   if (y < frame.top || y > frame.bottom) return null;
   const { value, unit } = formatQuantity(roadC, 'temperature', system);
   return (
-    <g>
-      <path
-        d={`M${frame.left} ${y}H${frame.right}`}
-        strokeDasharray="1 5"
-        strokeLinecap="round"
-        strokeWidth={2}
-        className="stroke-soft"
-      />
-      <text x={frame.right} y={y - 6} textAnchor="end" className={`fill-soft text-[13px] ${rimmed}`}>
-        tonight’s road, {value} {unit}
-      </text>
-    </g>
+    <text x={frame.left + 4} y={y + 16} className={`fill-soft text-[13px] ${rimmed}`}>
+      {frame.isNarrow ? 'road' : 'tonight’s road'}, {value} {unit}
+    </text>
   );
 }
 
@@ -129,16 +155,17 @@ function ThisBrine({
 }: Readonly<{ brine: NonNullable<LiquidusChartProps['brine']>; frame: ChartFrame; scales: ChartScales }>) {
   const x = scales.x(brine.massFraction);
   const y = scales.y(brine.freezingPointC);
-  const isAtRight = x > frame.right - 90;
+  // On the branch where the salt separates the free side is below and to the left; on the other, above and to the right.
+  const isLeft = brine.isPastEutectic;
   return (
     <g>
       <path d={`M${frame.left} ${y}H${x}V${frame.bottom}`} fill="none" strokeDasharray="2 4" className="stroke-ink" />
       <circle cx={x} cy={y} r={7} className="fill-ink" />
       <text
-        x={isAtRight ? x - 12 : x + 12}
-        y={y - 10}
-        textAnchor={isAtRight ? 'end' : 'start'}
-        className={`fill-ink text-[14px] font-semibold ${rimmed}`}
+        x={isLeft ? x - 11 : x + 12}
+        y={isLeft ? y + 19 : y - 10}
+        textAnchor={isLeft ? 'end' : 'start'}
+        className={`fill-ink text-[0.875rem] font-semibold ${rimmed}`}
       >
         this brine
       </text>
@@ -167,10 +194,12 @@ export function LiquidusChart({ salt, brine, roadC }: LiquidusChartProps) {
       >
         <Axes frame={frame} scales={scales} />
         {curves.map((curve) => (
-          <SaltCurve key={curve.salt} curve={curve} scales={scales} isChosen={false} />
+          <SaltCurve key={curve.salt} curve={curve} frame={frame} scales={scales} isChosen={false} />
         ))}
         <RoadLine roadC={roadC} frame={frame} scales={scales} />
-        <SaltCurve curve={chosen} scales={scales} isChosen />
+        <SaltCurve curve={chosen} frame={frame} scales={scales} isChosen />
+        {frame.isNarrow || brine?.isPastEutectic ? null : <SaltBranchName curve={chosen} scales={scales} />}
+        <RoadName roadC={roadC} frame={frame} scales={scales} />
         {brine === null ? null : <ThisBrine brine={brine} frame={frame} scales={scales} />}
       </svg>
     </div>

@@ -1,11 +1,13 @@
 'use client';
 
+import { classNames } from '@/components/ui/class-names';
 import { Field } from '@/components/ui/field';
 import { Figure } from '@/components/ui/figure';
 import { NumberInput } from '@/components/ui/number-input';
 import { Table, type Column } from '@/components/ui/table';
 import { useUnits } from '@/components/ui/units';
 import { LANE_WIDTH_12_FT_M, M_PER_MILE } from '@/lib/units/convert';
+import { formatQuantity } from '@/lib/units/format';
 import { type BenchQuery } from '@/lib/contracts/bench';
 import { tonightRow, type BenchProduct, type TonightRow } from './tonight-row';
 
@@ -23,9 +25,19 @@ const refusals: Readonly<Record<string, string>> = {
   'above-freezing': 'not needed',
 };
 
+/** Gallons per lane-mile stand under their number: beside it they would push the cost off the side. */
 function RateCell({ row }: Readonly<{ row: TonightRow }>) {
-  if (!row.result.ok) return <span className="font-sans text-frozen">{refusals[row.result.reason]}</span>;
-  return <Figure value={row.rate} quantity={row.product.isLiquid ? 'liquidRate' : 'rate'} />;
+  const system = useUnits();
+  if (!row.result.ok || row.rate === null) {
+    const reason = row.result.ok ? '' : refusals[row.result.reason];
+    return <span className="font-sans whitespace-normal text-frozen">{reason}</span>;
+  }
+  const { value, unit } = formatQuantity(row.rate, row.product.isLiquid ? 'liquidRate' : 'rate', system);
+  return (
+    <>
+      {value} <span className={classNames('font-sans text-sm text-soft', system === 'us' && 'block')}>{unit}</span>
+    </>
+  );
 }
 
 function useColumns(currency: string): readonly Column<TonightRow>[] {
@@ -53,7 +65,7 @@ function useColumns(currency: string): readonly Column<TonightRow>[] {
     { key: 'rate', head: 'Rate', isNumber: true, cell: (row) => <RateCell row={row} /> },
     {
       key: 'cost',
-      head: isUs ? 'A lane-mile' : 'A lane-km',
+      head: isUs ? 'Per lane-mile' : 'Per lane-km',
       isNumber: true,
       cell: ({ costCentsPerLaneM }) =>
         costCentsPerLaneM === null ? (
@@ -85,7 +97,6 @@ export function TonightTable({ products, roadC, waterMm, currency, onChange }: T
         <Field label="Water on it">
           <NumberInput
             quantity="depth"
-            digits={2}
             defaultValue={waterMm}
             onValue={(next) => next !== null && next >= 0.01 && next <= 20 && onChange({ waterMm: next })}
           />

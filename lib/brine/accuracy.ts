@@ -43,3 +43,26 @@ export function expectedFreezingError(salt: Salt, freezingPointC: number): Expec
   if (salt === 'KCl') return null;
   return bands[salt].find(({ downToC }) => freezingPointC >= downToC) ?? null;
 }
+
+/**
+ * Expected error of the temperature at which a salt separates from an over-strong brine, °C; `null` where no table of
+ * that branch was found. MgCl2 against Lange Table 5.13 (24–30 %: 0.2 °C, 23 %: 0.9); for CaCl2 handbooks differ by up to
+ * 10 °C among themselves, so a tank is to be kept well clear of it; NaCl meets its published peritectic within
+ * 0.1 °C and its eutectic within 0.2 % of salt, which on this steep branch is worth about 1 °C (judged, no table).
+ */
+export function expectedSaltPointError(salt: Salt): ExpectedError | null {
+  switch (salt) {
+    case 'NaCl':
+      return {
+        errorC: 1,
+        rateError: 0.015,
+        against: 'the two ends of this branch in print; a tenth of a per cent of salt moves it by 0.7 °C',
+      };
+    case 'CaCl2':
+      return { errorC: 10, rateError: 0.05, against: 'handbooks, which differ by that much on this branch' };
+    case 'MgCl2':
+      return { errorC: 1, rateError: 0.07, against: 'Lange’s Handbook' };
+    case 'KCl':
+      return null;
+  }
+}

@@ -71,27 +71,27 @@ export function BenchScreen({ materials, currency, road }: BenchScreenProps) {
         facts={['What a brine does, from any reading you can take of it']}
         actions={<Button onClick={copy}>Copy link</Button>}
       />
-      <PageBody className="grid-cols-[minmax(0,1fr)] gap-x-10 lg:grid-cols-[17rem_minmax(0,1fr)] xl:grid-cols-[17rem_minmax(0,1fr)_21rem]">
-        <div className="grid content-start gap-8">
-          <Section title="Reading">
-            <ReadingForm bench={bench} onChange={change} />
-          </Section>
-          {brine ? (
-            <Section title="Tank">
-              <TankChange bench={bench} brine={brine} onChange={change} />
-            </Section>
-          ) : null}
-        </div>
-        <div className="grid content-start gap-5">
+      <PageBody className="grid-cols-[minmax(0,1fr)] gap-x-10 lg:grid-cols-[17rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr] xl:grid-cols-[17rem_minmax(0,1fr)_21rem]">
+        <Section title="Reading">
+          <ReadingForm bench={bench} onChange={change} />
+        </Section>
+        <div className="grid content-start gap-5 lg:row-span-2">
           {assessed.ok ? <BrineFigures brine={assessed} /> : <Refusal refused={assessed} salt={bench.salt} />}
           <LiquidusChart
             salt={bench.salt}
             roadC={roadC}
-            brine={brine && { massFraction: brine.massFraction, freezingPointC: brine.freezing.freezingPointC }}
+            brine={brine && { ...brine, freezingPointC: brine.freezing.freezingPointC }}
           />
           <CurvesTable />
         </div>
-        <div className="grid content-start gap-8 lg:col-span-2 lg:grid-cols-2 xl:col-span-1 xl:grid-cols-1">
+        <Section title="Tank" className="lg:col-start-1">
+          {brine ? (
+            <TankChange bench={bench} brine={brine} onChange={change} />
+          ) : (
+            <p className="text-soft">Once the brine is known, this says what to stir in.</p>
+          )}
+        </Section>
+        <div className="grid content-start gap-8 lg:col-span-2 lg:grid-cols-2 xl:col-span-1 xl:col-start-3 xl:row-span-2 xl:row-start-1 xl:grid-cols-1">
           <Section
             title="For tonight’s road"
             lead={bench.roadC === undefined ? (road?.words ?? 'No reading in three hours; typed figures') : 'As typed'}
