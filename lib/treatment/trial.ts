@@ -32,15 +32,19 @@ export interface JudgedStep {
   targetPhi: number;
 }
 
+// Fields one by one: spreading objects here took half the time of a whole plan.
 function judge(film: Film, at: { index: number; tempC: number }, promise: PassOverRoad['promise']): JudgedStep {
+  const { index, tempC } = at;
+  const { NaCl, CaCl2, MgCl2, KCl } = film.dissolved;
   const target = targetOf(film);
   return {
-    ...at,
+    index,
+    tempC,
     waterMm: waterMmOf(film),
-    masses: { ...film.dissolved },
+    masses: { NaCl, CaCl2, MgCl2, KCl },
     phi: brineShare(film),
     target,
-    targetPhi: targetBrineShare(promise, target, at.tempC),
+    targetPhi: targetBrineShare(promise, target, tempC),
   };
 }
 
