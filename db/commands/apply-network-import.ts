@@ -50,8 +50,10 @@ export async function applyNetworkImport(given: ApplyNetworkImport): Promise<App
     refuseDiscarded(row);
     if (row.state === 'applied') return { id: given.id, added: 0, updated: 0, retired: 0, wasApplied: true };
     const detail = await findNetworkImport({ id: given.id }, tx);
-    if (!detail?.payload) throw new Problem('not-found', { what: 'load of roads' });
-    const image = await writeNetwork(tx, networkOf(detail.payload, detail.mapping), given);
+    if (!detail?.payload) throw new Problem('not-found', { what: 'import of roads' });
+    const network = networkOf(detail.payload, detail.mapping);
+    refuseEmpty(network);
+    const image = await writeNetwork(tx, network, given);
     await execute(
       tx,
       `update network_imports set state = 'applied', source = :source, attribution = :attribution, applied_at = :now,
@@ -71,6 +73,15 @@ export async function applyNetworkImport(given: ApplyNetworkImport): Promise<App
       detail: { fileName: detail.fileName, source: given.source, ...counts },
     });
     return { id: given.id, ...counts, wasApplied: false };
+  });
+}
+
+/** An empty import would take every road of its source out of use. */
+function refuseEmpty({ segments }: Network): void {
+  if (segments.length > 0) return;
+  throw new Problem('not-possible-now', {
+    reason: 'No road is left of this file: every line is of a class that is left out, or has no length.',
+    todo: 'Give at least one class a service class, or choose another file.',
   });
 }
 

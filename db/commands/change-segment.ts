@@ -8,7 +8,7 @@ import { recordAudit } from './audit';
 /** Attributes of the form that a repeated import would otherwise overwrite. */
 const kept = ['name', 'serviceClass', 'lanes', 'surface', 'exposure'] as const;
 
-/** Changes one road by hand. What is changed is no longer assumed, and a repeated load of the file leaves it alone. */
+/** Changes one road by hand. What is changed is no longer assumed, and a repeated import of the file leaves it alone. */
 export async function changeSegment(given: {
   input: ChangeSegmentInput;
   by: number;

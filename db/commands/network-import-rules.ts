@@ -9,7 +9,7 @@ export interface ImportRow {
 }
 
 /**
- * One change of the network at a time: two loads side by side would each compare with a state that the other is
+ * One change of the network at a time: two imports side by side would each compare with a state that the other is
  * changing. Held until the transaction ends.
  */
 export async function lockNetwork(tx: Tx): Promise<void> {
@@ -23,14 +23,14 @@ export async function findImportForChange(tx: Tx, id: number): Promise<ImportRow
     tx,
   );
   const row = rows[0];
-  if (!row) throw new Problem('not-found', { what: 'load of roads' });
+  if (!row) throw new Problem('not-found', { what: 'import of roads' });
   return row;
 }
 
 export function refuseDiscarded({ state }: ImportRow): void {
   if (state !== 'discarded') return;
   throw new Problem('not-possible-now', {
-    reason: 'This load was discarded.',
+    reason: 'This import was discarded.',
     todo: 'Choose the file again.',
   });
 }

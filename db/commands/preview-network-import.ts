@@ -19,12 +19,6 @@ export interface PreviewNetworkImport {
 /** Keeps a file's roads beside the network, changing nothing of it. The same file again is the same preview. */
 export async function previewNetworkImport(given: PreviewNetworkImport): Promise<{ id: number }> {
   const { report } = networkOf(given.payload, given.mapping);
-  if (report.segments === 0) {
-    throw new Problem('unreadable-file', {
-      reason: 'No road is left of this file: every line is of a class that is left out, or has no length.',
-      todo: 'Choose a file with roads for vehicles.',
-    });
-  }
   return inTransaction(async (tx) => {
     await lockNetwork(tx);
     const id = (await findSamePreview(tx, given)) ?? (await insertPreview(tx, given));
@@ -86,12 +80,12 @@ export async function remapNetworkImport(given: { id: number; mapping: ClassMapp
     refuseDiscarded(row);
     if (row.state === 'applied') {
       throw new Problem('not-possible-now', {
-        reason: 'This load is saved already.',
+        reason: 'This import is saved already.',
         todo: 'Undo it first, or change single roads in the list.',
       });
     }
     const detail = await findNetworkImport({ id: given.id }, tx);
-    if (!detail?.payload) throw new Problem('not-found', { what: 'load of roads' });
+    if (!detail?.payload) throw new Problem('not-found', { what: 'import of roads' });
     const { report } = networkOf(detail.payload, given.mapping);
     await execute(
       tx,
@@ -108,7 +102,7 @@ export async function discardNetworkImport(given: { id: number; by: number }): P
     const row = await findImportForChange(tx, given.id);
     if (row.state === 'discarded') return { id: given.id };
     if (row.state === 'applied') {
-      throw new Problem('not-possible-now', { reason: 'This load is saved already.', todo: 'Undo it first.' });
+      throw new Problem('not-possible-now', { reason: 'This import is saved already.', todo: 'Undo it first.' });
     }
     await execute(tx, `update network_imports set state = 'discarded', payload = 'null' where id = :id`, {
       id: given.id,

@@ -14,7 +14,7 @@ export interface UndoneNetworkImport {
 }
 
 /**
- * Puts the network back as it was before a load was saved: changed and retired roads get every value back, new ones are
+ * Puts the network back as it was before an import was saved: changed and retired roads get every value back, new ones are
  * removed, except those that something refers to by now, which are retired. Undoing twice is harmless.
  */
 export async function undoNetworkImport(given: { id: number; by: number; now: Date }): Promise<UndoneNetworkImport> {
@@ -24,7 +24,7 @@ export async function undoNetworkImport(given: { id: number; by: number; now: Da
     if (row.state === 'undone') return { id: given.id, removed: 0, restored: 0, kept: 0, wasUndone: true };
     if (row.state !== 'applied') {
       throw new Problem('not-possible-now', {
-        reason: 'This load is not saved, so there is nothing to undo.',
+        reason: 'This import is not saved, so there is nothing to undo.',
         todo: 'Discard it instead.',
       });
     }
@@ -59,7 +59,7 @@ async function findImage(tx: Tx, id: number): Promise<BeforeImage> {
   return rows[0]?.image ?? { segments: [], addedSegmentIds: [], addedNodeIds: [], retiredSegmentIds: [] };
 }
 
-/** A later load that changed the same roads stands on this one, and has to be taken back first. */
+/** A later import that changed the same roads stands on this one, and has to be taken back first. */
 async function refuseWhenBuiltUpon(tx: Tx, row: ImportRow, image: BeforeImage): Promise<void> {
   const rows = await selectRows<{ fileName: string }>(
     `select file_name as "fileName" from network_imports later
@@ -79,7 +79,7 @@ async function refuseWhenBuiltUpon(tx: Tx, row: ImportRow, image: BeforeImage): 
   const later = rows[0];
   if (!later) return;
   throw new Problem('not-possible-now', {
-    reason: `“${later.fileName}” was saved after this load and changed the same roads.`,
+    reason: `“${later.fileName}” was saved after this import and changed the same roads.`,
     todo: 'Undo that one first.',
   });
 }

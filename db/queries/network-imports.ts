@@ -1,5 +1,6 @@
 import { buildNetwork } from '@/lib/geo/build-network';
 import { type ClassMapping } from '@/lib/geo/assumed';
+import { type Bounds } from '@/lib/geo/position';
 import { type Network, type NetworkReport, type NetworkWarning, type SourceLine } from '@/lib/geo/network';
 import { selectRows, type Tx } from '../transaction';
 
@@ -44,7 +45,7 @@ const tables = `
   network_imports i left join people c on c.id = i.created_by
   left join people a on a.id = i.applied_by left join people u on u.id = i.undone_by`;
 
-/** Loads of the network, the newest first; previews that were discarded are left out. */
+/** Imports of the network, the newest first; previews that were discarded are left out. */
 export async function listNetworkImports(): Promise<NetworkImportRecord[]> {
   return selectRows<NetworkImportRecord>(
     `select ${columns} from ${tables} where i.state <> 'discarded' order by i.id desc limit 100`,
@@ -71,7 +72,7 @@ export async function findLastMapping({ source }: { source: string }): Promise<C
   return rows[0]?.mapping ?? {};
 }
 
-/** Whose data the roads in use are: the notices given when they were loaded. */
+/** Whose data the roads in use are: the notices given when they were imported. */
 export async function listNetworkAttributions(): Promise<string[]> {
   const rows = await selectRows<{ attribution: string }>(
     `select distinct i.attribution from network_imports i
@@ -85,4 +86,14 @@ export async function listNetworkAttributions(): Promise<string[]> {
 /** The same lines and mapping always give the same network, so it is built anew rather than stored twice. */
 export function networkOf(payload: ImportPayload, mapping: ClassMapping): Network {
   return buildNetwork(payload.lines, { mapping, skipped: payload.skipped, warnings: payload.warnings });
+}
+
+/** The box around the roads in use, or null while there are none. */
+export async function findNetworkBounds(): Promise<Bounds | null> {
+  const rows = await selectRows<{ west: number | null; south: number; east: number; north: number }>(
+    `select st_xmin(box) as west, st_ymin(box) as south, st_xmax(box) as east, st_ymax(box) as north
+       from (select st_extent(geometry) as box from segments where retired_at is null) as extent`,
+  );
+  const row = rows[0];
+  return row && row.west !== null ? [row.west, row.south, row.east, row.north] : null;
 }

@@ -25,10 +25,10 @@ export function presentImport(record: NetworkImportRecord): NetworkImportRow {
   };
 }
 
-/** A load with its report, what saving would do, and its roads for the map. */
+/** An import with its report, what saving would do, and its roads for the map. */
 export async function readNetworkImport(id: number): Promise<NetworkImportView> {
   const detail = await findNetworkImport({ id });
-  if (!detail?.payload) throw new Problem('not-found', { what: 'load of roads' });
+  if (!detail?.payload) throw new Problem('not-found', { what: 'import of roads' });
   const network = networkOf(detail.payload, detail.mapping);
   const roads = detail.state === 'applied' ? savedRoads(network) : await previewedRoads(network, detail);
   const changes = { added: 0, changed: 0, same: 0, retired: 0 };

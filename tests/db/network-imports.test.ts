@@ -96,10 +96,11 @@ describe('preview', () => {
     expect(await listNetworkImports()).toEqual([]);
   });
 
-  it('refuses a file of which no road is left', async () => {
-    await expect(preview([line('9', [a, b], { highway: 'steps' })], 'steps')).rejects.toMatchObject({
-      code: 'unreadable-file',
-    });
+  it('of a file whose every class is left out is kept, to be mapped, but cannot be saved so', async () => {
+    const { id } = await preview([line('9', [a, b], { highway: 'track' })], 'track');
+    await expect(apply(id)).rejects.toMatchObject({ code: 'not-possible-now' });
+    await remapNetworkImport({ id, mapping: { track: 'D' } });
+    expect(await apply(id)).toMatchObject({ added: 1 });
   });
 });
 

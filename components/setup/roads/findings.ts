@@ -20,7 +20,7 @@ export interface FindingGroup {
 
 const trapWords: Readonly<Record<NetworkReportView['traps'][number]['kind'], readonly [string, string]>> = {
   'no-way-out': ['no way back', 'A truck can get here, but the one-way directions lead it out of the map.'],
-  'no-way-in': ['no way in', 'A truck can leave from here, but no road of the file leads to it.'],
+  'no-way-in': ['no way in', 'A truck can leave from here, but no road of the file leads here.'],
   'through-only': ['not tied to the rest', 'The one-way directions lead past the rest of the network.'],
 };
 
@@ -75,7 +75,7 @@ function zeroLengthOf({ zeroLength }: NetworkReportView): Finding[] {
 function partsOf({ components }: NetworkReportView, length: Length): Finding[] {
   return components.slice(1).map(({ segments, lengthKm, at }, index) => ({
     key: `part ${index}`,
-    what: `${counted(segments, 'road')}, ${length(lengthKm * 1000)}, meet no other road.`,
+    what: `${counted(segments, 'road')}, ${length(lengthKm * 1000)}, ${segments === 1 ? 'meets' : 'meet'} no other road.`,
     meaning: '',
     at,
     sourceIds: [],

@@ -9,40 +9,51 @@ export type ImportFiguresProps = Readonly<{ view: NetworkImportView }>;
 /** What the file became. */
 export function ImportFigures({ view: { report } }: ImportFiguresProps) {
   return (
-    <dl className="grid grid-cols-3 gap-x-4 gap-y-5">
+    <dl className="flex flex-wrap gap-x-5 gap-y-5 sm:gap-x-8">
       <FigureBlock label="Roads" beside={`from ${counted(report.linesRead, 'line')}`}>
         {formatNumber(report.segments, 0)}
       </FigureBlock>
       <FigureBlock label="Length" beside={`${formatNumber(report.oneWaySegments, 0)} one-way`}>
-        <Figure value={report.lengthKm * 1000} quantity="distance" size="inline" />
+        <Figure value={report.lengthKm * 1000} quantity="distance" size="large" />
       </FigureBlock>
       <FigureBlock label="Lanes" beside={counted(report.bridges, 'bridge')}>
-        <Figure value={report.laneKm * 1000} quantity="laneDistance" size="inline" digits={0} />
+        <Figure value={report.laneKm * 1000} quantity="laneDistance" size="large" digits={0} />
       </FigureBlock>
     </dl>
   );
 }
 
-const effects: readonly { change: RoadChange; tone: TagTone; does: string }[] = [
-  { change: 'added', tone: 'lamp', does: 'are new' },
-  { change: 'changed', tone: 'closing', does: 'are there already and change' },
-  { change: 'same', tone: 'plain', does: 'are there already as they are' },
-  { change: 'retired', tone: 'frozen', does: 'are not in this file any more: taken out of use, never deleted' },
+const effects: readonly { change: RoadChange; tone: TagTone; one: string; many: string; after: string }[] = [
+  { change: 'added', tone: 'lamp', one: 'new road', many: 'new roads', after: '' },
+  {
+    change: 'changed',
+    tone: 'closing',
+    one: 'changed road',
+    many: 'changed roads',
+    after: 'there already; they keep what was set by hand',
+  },
+  { change: 'same', tone: 'plain', one: 'road as it is', many: 'roads as they are', after: '' },
+  {
+    change: 'retired',
+    tone: 'frozen',
+    one: 'road taken out of use',
+    many: 'roads taken out of use',
+    after: 'no longer in the file; never deleted',
+  },
 ];
 
 /** What saving will do to the network; the strokes are those of the map. */
 export function SavingEffects({ view: { changes } }: ImportFiguresProps) {
   return (
-    <ul className="grid gap-1">
+    <ul className="grid gap-1.5">
       {effects
         .filter(({ change }) => changes[change] > 0)
-        .map(({ change, tone, does }) => (
-          <li key={change}>
-            <Tag tone={tone} className="items-start whitespace-normal [&>span]:mt-2.5 [&>span]:shrink-0">
-              <span className="text-ink">
-                <strong className="font-mono font-semibold">{formatNumber(changes[change], 0)}</strong> {does}
-              </span>
+        .map(({ change, tone, one, many, after }) => (
+          <li key={change} className="flex flex-wrap gap-x-3">
+            <Tag tone={tone}>
+              <span className="font-semibold text-ink">{counted(changes[change], one, many)}</span>
             </Tag>
+            {after ? <span className="text-soft">{after}</span> : null}
           </li>
         ))}
     </ul>

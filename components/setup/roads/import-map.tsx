@@ -22,7 +22,7 @@ const styleOf: Readonly<Record<RoadChange, RoadStyle>> = {
   retired: 'removed',
 };
 
-/** The roads of a load, coloured by what saving does to them. */
+/** The roads of an import, coloured by what saving does to them. */
 export function ImportMap({ view, shown, selectedId, onSelect, className }: ImportMapProps) {
   const { roads } = view;
   const segments: MapSegment[] = roads.map(({ name, serviceClass, lanes, path }, id) => ({

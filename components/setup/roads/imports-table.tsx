@@ -27,11 +27,11 @@ function lastStep(row: NetworkImportRow, zone: string): string {
   return `${formatDateTime(new Date(at ?? row.createdAt), zone)}, ${name ?? 'someone'}`;
 }
 
-/** What was loaded, by whom and when, and what became of it. */
+/** What was imported, by whom and when, and what became of it. */
 export function ImportsTable({ imports, zone }: ImportsTableProps) {
   return (
     <Table
-      caption="Loads of the road network, newest first"
+      caption="Imports of the road network, newest first"
       rows={imports}
       rowKey={(row) => row.id}
       rowClassName={(row) => (row.state === 'undone' ? 'text-soft' : undefined)}
@@ -40,8 +40,9 @@ export function ImportsTable({ imports, zone }: ImportsTableProps) {
           key: 'file',
           head: 'File',
           isRowHead: true,
+          className: 'min-w-44',
           cell: (row) => (
-            <Link href={`/setup/roads/${row.id}` as Route} className="link break-all">
+            <Link href={`/setup/roads/${row.id}` as Route} className="link wrap-anywhere">
               {row.fileName}
             </Link>
           ),

@@ -45,7 +45,7 @@ const exposureWords: Readonly<Record<Exposure, string>> = {
 
 export type RoadFormProps = Readonly<{ road: ListedRoad; submission: FormSubmission }>;
 
-/** One road by hand. What is changed here outlives a repeated load of its file. */
+/** One road by hand. What is changed here outlives a repeated import of its file. */
 export function RoadForm({ road, submission }: RoadFormProps) {
   const { fields } = submission;
   const hint = (attribute: string) => (road.assumed.includes(attribute) ? 'Assumed so far.' : undefined);

@@ -2,7 +2,7 @@ import { queryOptions } from '@tanstack/react-query';
 import { NetworkImportView } from '@/lib/contracts/network';
 import { ask } from '../api';
 
-/** A load of roads with its report; changes only when somebody maps classes, saves or undoes. */
+/** An import of roads with its report; changes only when somebody maps classes, saves or undoes. */
 export const networkImportQuery = (id: number) =>
   queryOptions({
     queryKey: ['network-import', id],

@@ -60,18 +60,18 @@ export function RoadsSetupScreen(props: RoadsSetupScreenProps) {
         ]}
       />
       <PageBody>
-        <Section title="Load roads from a file" className="max-w-4xl">
+        <Section title="Import roads from a file" className="max-w-4xl">
           <LoadFile />
         </Section>
         {imports.length > 0 ? (
-          <Section title="Loads">
+          <Section title="Imports">
             <ImportsTable imports={imports} zone={zone} />
           </Section>
         ) : null}
         <Section title="Roads in use">
           {totals.segments === 0 ? (
             <EmptyState title="There are no roads yet.">
-              Load a file of centre lines above; look at the preview, then save it.
+              Import a file of centre lines above; look at the preview, then save it.
             </EmptyState>
           ) : (
             <RoadsInUse {...props} />
@@ -123,7 +123,7 @@ function RoadsInUse({ roads, filter, shown, totals, pages }: RoadsSetupScreenPro
   const [chosenId, setChosenId] = useState<number | null>(null);
   const change = useSubmission(changeSegmentAction, () => {
     setChosenId(null);
-    announce('Saved. A repeated load of its file leaves this road as you set it.');
+    announce('Saved. A repeated import of its file leaves this road as you set it.');
   });
   const { find, serviceClass, assumed, page } = filter;
   const values = { find, serviceClass, assumed };

@@ -1,8 +1,10 @@
 import { previewNetworkImport } from '@/db/commands/preview-network-import';
-import { findLastMapping } from '@/db/queries/network-imports';
+import { findLastMapping, findNetworkBounds } from '@/db/queries/network-imports';
 import { UploadNetworkQuery, UploadNetworkReply } from '@/lib/contracts/network';
 import { suggestAttribution } from '@/lib/geo/attribution';
 import { type NetworkWarning } from '@/lib/geo/network';
+import { checkPlace } from '@/lib/geo/place-check';
+import { boundsOf } from '@/lib/geo/position';
 import { readGeoJson } from '@/lib/geo/read-geojson';
 import { Problem } from '@/lib/problem';
 import { handle } from '@/lib/server/handle';
@@ -26,6 +28,7 @@ export const POST = handle(
       throw new Problem('unreadable-file', { reason: happened, todo: todo.join(' ') });
     }
     const { lines, skipped, warnings } = reading;
+    const place = checkPlace(boundsOf(lines.map(({ positions }) => positions)), await findNetworkBounds());
     const source = query.source ?? query.fileName.replace(/\.[^.]*$/, '').slice(0, 80);
     return previewNetworkImport({
       fileName: query.fileName,
@@ -33,7 +36,7 @@ export const POST = handle(
       source,
       attribution: query.attribution ?? suggestAttribution(lines),
       mapping: await findLastMapping({ source }),
-      payload: { lines, skipped, warnings: isGuessedEncoding ? [...warnings, guessedEncoding] : warnings },
+      payload: { lines, skipped, warnings: [...warnings, ...place, ...(isGuessedEncoding ? [guessedEncoding] : [])] },
       by: actor?.id ?? 0,
       now: new Date(),
     });

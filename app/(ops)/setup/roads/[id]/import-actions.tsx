@@ -40,7 +40,11 @@ function Save({ view, onChanged }: ImportActionsProps) {
   });
   return (
     <>
-      <Button variant="primary" onClick={() => setIsOpen(true)}>
+      <Button
+        variant="primary"
+        disabledReason={view.report.segments === 0 ? 'No road is left: every class of the file is left out.' : null}
+        onClick={() => setIsOpen(true)}
+      >
         {view.state === 'undone' ? 'Save again' : 'Save'}
       </Button>
       <Dialog
@@ -105,7 +109,7 @@ function Undo({ view, onChanged }: ImportActionsProps) {
       <Dialog
         isOpen={isOpen}
         onOpenChange={setIsOpen}
-        title="Undo this load"
+        title="Undo this import"
         description="The network goes back to what it was before it was saved. What was changed by hand on these roads since is lost."
       >
         <p className="mb-4 text-soft">
@@ -119,7 +123,7 @@ function Undo({ view, onChanged }: ImportActionsProps) {
             busyLabel="Undoing"
             onClick={() => undo.send({ id: view.id })}
           >
-            Undo the load
+            Undo the import
           </Button>
           <Button onClick={() => setIsOpen(false)}>Leave it saved</Button>
         </div>

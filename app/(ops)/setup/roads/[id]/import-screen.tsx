@@ -48,7 +48,7 @@ export function ImportScreen({ id, zone }: ImportScreenProps) {
       <div className="p-8">
         <Notice
           tone="problem"
-          title="This load could not be read."
+          title="This import could not be read."
           kept="Nothing was changed."
           todo="Reload the page."
         />

@@ -9,7 +9,7 @@ import { readNetworkImport } from '@/lib/server/network-import-view';
 import { requirePage } from '@/lib/server/page';
 import { ImportScreen } from './import-screen';
 
-export const metadata: Metadata = { title: 'Load of roads' };
+export const metadata: Metadata = { title: 'Import of roads' };
 
 export default async function ImportPage({ params }: PageProps<'/setup/roads/[id]'>) {
   await requirePage('setup.roads');
