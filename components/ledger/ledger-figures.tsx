@@ -3,12 +3,16 @@
 import { Figure, FigureBlock } from '@/components/ui/figure';
 import { type LedgerView } from '@/lib/contracts/ledger';
 import { differenceFraction } from '@/lib/ledger/account';
+import { formatNumber } from '@/lib/units/format';
 import { Difference } from './difference';
 
 export type LedgerFiguresProps = Readonly<{ ledger: LedgerView }>;
 
+/** Cents as whole money, grouped like every other figure: "€5 159". */
 export function money(cents: number, currency: string): string {
-  return new Intl.NumberFormat('en-IE', { style: 'currency', currency, maximumFractionDigits: 0 }).format(cents / 100);
+  const parts = new Intl.NumberFormat('en-IE', { style: 'currency', currency }).formatToParts(0);
+  const sign = parts.find((part) => part.type === 'currency')?.value ?? currency;
+  return `${sign}${formatNumber(cents / 100, 0)}`;
 }
 
 /** The five figures that matter. */

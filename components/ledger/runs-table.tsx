@@ -32,8 +32,12 @@ export function RunsTable({ runs, zone, chosenRunId, onChoose }: RunsTableProps)
         </button>
       ),
     },
-    { key: 'truck', head: 'Truck', isNumber: true, cell: (run) => run.truckNumber },
-    { key: 'driver', head: 'Driver', cell: (run) => run.driverName, className: 'whitespace-nowrap' },
+    {
+      key: 'crew',
+      head: 'Truck and driver',
+      className: 'whitespace-nowrap',
+      cell: (run) => `${run.truckNumber}, ${run.driverName}`,
+    },
     {
       key: 'from',
       head: 'Out at',
@@ -41,7 +45,7 @@ export function RunsTable({ runs, zone, chosenRunId, onChoose }: RunsTableProps)
       cell: (run) => (
         <>
           {formatDayTime(new Date(run.startedAt), zone)}
-          {run.finishedAt ? '' : ', still out'}
+          {run.finishedAt ? null : <span className="block text-sm text-soft">still out</span>}
         </>
       ),
     },

@@ -16,7 +16,7 @@ const numberLook: Readonly<Record<FigureSize, string>> = {
 
 const unitLook: Readonly<Record<FigureSize, string>> = {
   inline: 'text-soft',
-  normal: 'text-[0.875em] text-soft',
+  normal: 'font-sans text-[0.875em] text-soft',
   large: 'text-lg font-semibold',
   cab: 'text-3xl font-bold',
 };

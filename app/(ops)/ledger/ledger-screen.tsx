@@ -67,32 +67,32 @@ function StormLedger({ zone, stormId, storms }: Omit<LedgerScreenProps, 'chosenI
           `${formatDayTime(new Date(ledger.fromAt), zone)} to ${formatDayTime(new Date(ledger.untilAt), zone)}, ${ledger.isClosed ? 'closed' : 'still open'}`,
         ]}
         actions={
-          <DownloadLink variant="primary" href={`/api/storms/${stormId}/ledger.csv`}>
-            Download CSV
-          </DownloadLink>
+          <>
+            <Field label="Storm" isLabelHidden className="w-72">
+              <Select
+                value={String(stormId)}
+                onChange={(event) => router.push(`/ledger?storm=${event.target.value}`)}
+                options={storms.map((storm) => ({
+                  value: String(storm.id),
+                  label: `Storm ${two(storm.number)}, ${storm.name}`,
+                }))}
+              />
+            </Field>
+            <DownloadLink variant="primary" href={`/api/storms/${stormId}/ledger.csv`}>
+              Download CSV
+            </DownloadLink>
+          </>
         }
       />
       <PageBody>
-        <div className="flex flex-wrap items-end justify-between gap-6">
-          <LedgerFigures ledger={ledger} />
-          <Field label="Storm" className="w-64 print:hidden">
-            <Select
-              value={String(stormId)}
-              onChange={(event) => router.push(`/ledger?storm=${event.target.value}`)}
-              options={storms.map((storm) => ({
-                value: String(storm.id),
-                label: `${two(storm.number)}, ${storm.name}`,
-              }))}
-            />
-          </Field>
-        </div>
+        <LedgerFigures ledger={ledger} />
         {ledger.runs.length === 0 ? (
           <EmptyState title="No truck has been out in this storm.">
             Runs appear here as drivers take them in the cab.
           </EmptyState>
         ) : (
           <>
-            <div className="grid items-start gap-x-10 gap-y-8 2xl:grid-cols-[minmax(0,1fr)_22rem]">
+            <div className="grid items-start gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,1fr)_18rem]">
               <Section title="By run">
                 <RunsTable runs={ledger.runs} zone={zone} chosenRunId={runId} onChoose={setRunId} />
               </Section>
