@@ -79,10 +79,10 @@ export function RunScreen({ runId, entries, materials, yards, header, notices, k
     .join(', ');
 
   return (
-    <div className="grid min-h-dvh grid-rows-[auto_auto_1fr]">
+    <div className="flex min-h-dvh flex-col">
       {header(`Truck ${run.truckNumber}`, subtitle)}
-      {notices ?? <span />}
-      <main className="grid lg:grid-cols-[1fr_minmax(20rem,26rem)]">
+      {notices}
+      <main className="grid flex-1 lg:grid-cols-[1fr_minmax(20rem,26rem)]">
         <div className="flex flex-col justify-between gap-8 p-6">
           {now ? <RoadPanel road={now} /> : <RunEnd run={run} onTakeAnother={onLeave} />}
           <RunButtons
