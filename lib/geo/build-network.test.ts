@@ -272,7 +272,7 @@ describe('any network', () => {
     }
   });
 
-  it('builds 6,000 lines of 12 vertices in under two seconds', () => {
+  it('builds 6,000 lines of 12 vertices in under two seconds of one core', () => {
     const next = random(99);
     const lines = Array.from({ length: 6000 }, (_, id) => {
       const [column, row] = [next(400), next(400)];
@@ -281,12 +281,12 @@ describe('any network', () => {
         Array.from({ length: 12 }, (_, step) => at(column + step, row + (id % 2) * step)),
       );
     });
+    // the processor's time, and the best of three: the machine may be busy with other things
     const takenMs = [1, 2, 3].map(() => {
-      const startedMs = performance.now();
+      const started = process.cpuUsage();
       buildNetwork(lines);
-      return performance.now() - startedMs;
+      return process.cpuUsage(started).user / 1000;
     });
-    // the best of three: the machine may be busy with other things
     expect(Math.min(...takenMs)).toBeLessThan(2000);
     const { segments } = buildNetwork(lines);
     expect(segments.length).toBeGreaterThan(6000);

@@ -98,9 +98,12 @@ function Undo({ view, onChanged }: ImportActionsProps) {
   const announce = useAnnounce();
   const undo = useSubmission(undoNetworkImportAction, ({ removed, restored, kept }) => {
     setIsOpen(false);
-    announce(
-      `Undone: ${counted(removed, 'road')} removed, ${restored} put back as they were${kept > 0 ? `, ${kept} kept out of use because plans, routes or runs name them` : ''}.`,
-    );
+    const parts = [
+      counted(removed, 'road') + ' removed',
+      restored > 0 ? `${restored} put back as they were` : '',
+      kept > 0 ? `${kept} kept out of use because plans, routes or runs name them` : '',
+    ];
+    announce(`Undone: ${parts.filter(Boolean).join(', ')}.`);
     onChanged();
   });
   return (
