@@ -5,7 +5,7 @@ import { Problem } from '@/lib/problem';
 import { stepAxis } from '@/lib/time/step-axis';
 import { planPass, type PassInputs, type PlannedRoad } from '@/lib/treatment/plan-pass';
 import { defaultPolicy } from '@/lib/treatment/policy';
-import { reasonSentence, type Wording } from '@/lib/treatment/reason';
+import { type Wording } from '@/lib/treatment/reason';
 import { summarisePlan } from '@/lib/treatment/summarise-plan';
 import { database } from '../connection';
 import { findForecast, type ForecastRecord } from '../queries/forecasts';
@@ -83,7 +83,8 @@ async function forecastFor(tx: Tx, { now }: WorkOutPlan, nextPassAt: number): Pr
 
 async function policyInForce(tx: Tx, { by, now }: WorkOutPlan) {
   const [row] = await selectRows<{ version: number; rules: unknown }>(
-    'select version, rules from policies where adopted_at <= :now order by version desc limit 1',
+    `select version, rules from policies
+      order by adopted_at <= :now desc, case when adopted_at <= :now then version end desc, version limit 1`,
     { now },
     tx,
   );
@@ -154,7 +155,7 @@ function inputsOf(gathered: Gathered, hasNextPass: boolean): PlanInputs {
   };
 }
 
-function summaryOf(gathered: Gathered, planned: readonly PlannedRoad[], wording: Wording): PlanSummary {
+function summaryOf(gathered: Gathered, planned: readonly PlannedRoad[]): PlanSummary {
   const { segments: roads, materials } = gathered;
   const byId = new Map(roads.map((road) => [road.id, road]));
   const exceptions = planned.flatMap(({ segmentId, treatment, parts }) => {
@@ -162,7 +163,7 @@ function summaryOf(gathered: Gathered, planned: readonly PlannedRoad[], wording:
     const isException = treatment.shorterCycle !== null || ['abrasives', 'undecided'].includes(treatment.action);
     if (!road || !isException) return [];
     const { name: roadName, serviceClass } = road;
-    return [{ segmentId, roadName, serviceClass, action: treatment.action, reason: reasonSentence(parts, wording) }];
+    return [{ segmentId, roadName, serviceClass, action: treatment.action, parts: [...parts] }];
   });
   return { ...summarisePlan({ roads, planned, materials }), exceptions };
 }
@@ -188,7 +189,7 @@ async function store(tx: Tx, command: WorkOutPlan, worked: { gathered: Gathered;
       workedOutAt: command.now,
       workedOutBy: command.by,
       inputs: inputsOf(gathered, span.hasNextPass),
-      summary: summaryOf(gathered, planned, wording),
+      summary: summaryOf(gathered, planned),
     },
     { transaction: tx },
   );

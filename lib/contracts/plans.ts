@@ -13,6 +13,7 @@ const number = z.number();
 export const WorkOutInput = z.strictObject({ stormId: RowId, passNumber: RowId });
 export const PublishInput = z.strictObject({ planId: RowId });
 
+const parts = z.array(z.custom<ReasonPart>((part) => typeof part === 'object' && part !== null && 'kind' in part));
 const cautions = Object.keys(cautionWords) as [Caution, ...Caution[]];
 const refusals = [
   'not-needed',
@@ -60,7 +61,7 @@ export const PlanWhy = z.object({
   pavementTempC: number.nullable(),
   coldestC: number.nullable(),
   before: z.object({ waterMm: number, saltGPerM2: number, massFraction: number, freezingPointC: number }).nullable(),
-  water: z.object({ nowMm: number, afterPloughMm: number, fallingMm: number }),
+  water: z.object({ nowMm: number, afterPloughMm: number, fallingMm: number, earlierSaltGPerM2: number }),
   binding: z
     .object({
       at,
@@ -77,7 +78,8 @@ export const PlanWhy = z.object({
   shorterCycle: z
     .object({ materialId: RowId, rateGPerM2: number, holdMin: number, neededRateGPerM2: number })
     .nullable(),
-  parts: z.array(z.custom<ReasonPart>((part) => typeof part === 'object' && part !== null && 'kind' in part)),
+  /** sentences are made of these with `reasonSentence`, in the reader's units */
+  parts,
   cautions: z.array(z.enum(cautions)),
   carried: z.object({
     stationIds: z.array(RowId),

@@ -48,8 +48,8 @@ export interface Treatment {
   readonly shorterCycle: ShorterCycle | null;
   readonly cautions: readonly Caution[];
   readonly options: readonly MaterialAnswer[];
-  /** water to deal with before the next pass: now, after the plough, and falling, mm */
-  readonly water: { nowMm: number; afterPloughMm: number; fallingMm: number };
+  /** water to deal with before the next pass: now, after the plough, and falling, mm; and earlier salt that stays */
+  readonly water: { nowMm: number; afterPloughMm: number; fallingMm: number; earlierSaltGPerM2: number };
   readonly coldestC: number;
 }
 
@@ -184,6 +184,7 @@ export function chooseTreatment(input: ChoiceInput): Treatment {
   const nowMm = waterMmOf(input.film);
   const residualMm = input.parameters?.ploughResidualMm ?? 0.3;
   const coldest = coldestC(input.weather, untilIndex);
+  const afterPloughMm = isPloughed ? Math.min(nowMm, residualMm) : nowMm;
   return {
     ...decision,
     isPloughed,
@@ -191,7 +192,8 @@ export function chooseTreatment(input: ChoiceInput): Treatment {
     cautions: cautionsOf(decision, found, coldest),
     water: {
       nowMm,
-      afterPloughMm: isPloughed ? Math.min(nowMm, residualMm) : nowMm,
+      afterPloughMm,
+      earlierSaltGPerM2: nowMm > 0 ? (saltGPerM2(input.film) * afterPloughMm) / nowMm : saltGPerM2(input.film),
       fallingMm: fallingMm(input, untilIndex).allMm,
     },
     coldestC: coldest,

@@ -57,7 +57,7 @@ const notWorkedOut: PlannedRoad['treatment'] = {
   rateMLPerM2: null,
   chosen: null,
   shorterCycle: null,
-  water: { nowMm: 0, afterPloughMm: 0, fallingMm: 0 },
+  water: { nowMm: 0, afterPloughMm: 0, fallingMm: 0, earlierSaltGPerM2: 0 },
 };
 
 function carriedFacts(carried: Carried): PlannedRoad['carried'] {

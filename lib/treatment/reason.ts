@@ -27,6 +27,7 @@ export type ReasonPart =
       readonly limitGPerM2: number;
       readonly holdMin: number;
     }
+  | { readonly kind: 'earlier-salt'; readonly saltGPerM2: number }
   | { readonly kind: 'blowing' }
   | { readonly kind: 'nothing-works'; readonly reasons: readonly RefusalReason[] }
   | { readonly kind: 'no-data' };
@@ -62,6 +63,7 @@ export function refusalSentence(
 ): string {
   const words = refusalWords[refusal.reason];
   const { neededRateGPerM2: needed, limit } = refusal;
+  if (limit === 0 && needed !== undefined) return 'the truck of the route cannot spread it';
   if (needed !== undefined && limit !== undefined) {
     return `${words}: ${shown(needed, 'rate', wording)} needed, ${shown(limit, 'rate', wording)} at most`;
   }
@@ -88,6 +90,8 @@ function wordsOf(part: ReasonPart, wording: Wording): string {
         : `holds until the next pass without treatment at ${shown(part.coldestC, 'temperature', wording)}, ${depth(part.fallingMm, wording)} to come`;
     case 'shorter-cycle':
       return `${shown(part.neededGPerM2, 'rate', wording)} would be needed; ${shown(part.limitGPerM2, 'rate', wording)}, the most allowed, holds for ${spanInWords(part.holdMin)}: come back by ${clock(part.holdMin, wording)}`;
+    case 'earlier-salt':
+      return `${shown(part.saltGPerM2, 'rate', wording)} of earlier salt counted`;
     case 'blowing':
       return 'cold, dry and blowing: chemical would make ice that does not form without it';
     case 'nothing-works':
@@ -128,10 +132,12 @@ function partsOfNoRate(treatment: Treatment): ReasonPart[] {
 
 /** The reason for a treatment in parts, the deciding one first. `untilMin`: to the next pass, from entry 0. */
 export function reasonParts(treatment: Treatment, untilMin: number): ReasonPart[] {
-  const { nowMm, afterPloughMm: leavesMm } = treatment.water;
+  const { nowMm, afterPloughMm: leavesMm, earlierSaltGPerM2 } = treatment.water;
+  const earlier: ReasonPart[] =
+    earlierSaltGPerM2 >= 0.5 ? [{ kind: 'earlier-salt', saltGPerM2: earlierSaltGPerM2 }] : [];
   const plough: ReasonPart[] = treatment.isPloughed ? [{ kind: 'plough-first', nowMm, leavesMm }] : [];
   const parts = treatment.chosen ? partsOfRate(treatment, untilMin) : partsOfNoRate(treatment);
-  return [...parts, ...plough];
+  return [...parts, ...plough, ...earlier];
 }
 
 /** "0.18 mm of water to hold at −6.2 °C until 05:40; 22 % allowed for scatter and traffic." */
