@@ -64,7 +64,9 @@ async function runTiers(asked) {
     if (names.length > 0) {
       say(`\n── ${names.join(', ')}`);
       const report = path.join(reports, `${names.join('-')}.json`);
-      total = addCounts(total, countsOf(report, await runVitest(root, names, report)));
+      const exitCode = await runVitest(root, names, report);
+      stopping.check();
+      total = addCounts(total, countsOf(report, exitCode));
     }
     stopping.check();
     await after?.();
