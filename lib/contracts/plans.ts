@@ -135,7 +135,7 @@ export const PlanSummary = z.object({
       roadName: z.string(),
       serviceClass: z.enum(serviceClasses),
       action: z.enum(treatmentActions),
-      reason: z.string(),
+      parts,
     }),
   ),
 });
