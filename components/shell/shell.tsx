@@ -32,18 +32,21 @@ export function Shell({ items, account, agencyName, children }: ShellProps) {
       >
         Go to the page
       </a>
-      <div className="hidden min-h-0 flex-col overflow-y-auto border-r bg-panel md:flex print:hidden">
+      <nav
+        aria-label="Places"
+        className="hidden min-h-0 flex-col overflow-y-auto border-r bg-panel md:flex print:hidden"
+      >
         <Link href={(items[0]?.href ?? '/') as Route} className="flex min-h-14 items-center pl-4">
           <Wordmark />
         </Link>
-        <nav aria-label="Places" className="flex-1">
+        <div className="flex-1">
           {items.map((item) => (
             <RailLink key={item.href} item={item} isActive={item === active} />
           ))}
-        </nav>
+        </div>
         {agencyName ? <p className="px-4 pt-4 pb-2 text-sm text-faint">{agencyName}</p> : null}
         <Account {...account} />
-      </div>
+      </nav>
       <main
         id="page"
         tabIndex={-1}

@@ -15,10 +15,10 @@ const numberLook: Readonly<Record<FigureSize, string>> = {
 };
 
 const unitLook: Readonly<Record<FigureSize, string>> = {
-  inline: 'text-soft',
+  inline: 'font-sans text-soft',
   normal: 'font-sans text-[0.875em] text-soft',
-  large: 'text-lg font-semibold',
-  cab: 'text-3xl font-bold',
+  large: 'font-sans text-lg font-semibold',
+  cab: 'font-sans text-3xl font-bold',
 };
 
 export type FigureProps = Readonly<{
@@ -47,7 +47,8 @@ export function Figure({
   className,
 }: FigureProps) {
   const system = useUnits();
-  if (value === null || value === undefined) return <span className={classNames('text-faint', className)}>{none}</span>;
+  if (value === null || value === undefined)
+    return <span className={classNames('font-sans text-faint', className)}>{none}</span>;
   const shown = formatQuantity(value, quantity, system, {
     ...(digits === undefined ? {} : { digits }),
     ...(signed === undefined ? {} : { signed }),

@@ -35,7 +35,7 @@ export async function findPublicStorm(): Promise<PublicStorm | null> {
   return rows[0] ?? null;
 }
 
-/** Roads by name, of the newest published plan. Rates, materials, trucks and people are nobody's business here. */
+/** Roads by name, of the newest published plan, those not wholly treated first. Rates, materials, trucks and people are nobody's business here. */
 export async function listPublicRoads({ stormId }: { stormId: number }): Promise<PublicRoad[]> {
   return selectRows<PublicRoad>(
     `with plan as (
@@ -56,7 +56,7 @@ export async function listPublicRoads({ stormId }: { stormId: number }): Promise
        join segments g on g.id = t.segment_id and g.retired_at is null
        left join treated on treated.segment_id = g.id
       group by g.name, g.service_class
-      order by g.service_class, g.name`,
+      order by g.service_class, count(treated.segment_id) = count(*), g.name`,
     { stormId },
   );
 }

@@ -70,10 +70,20 @@ export function AccountScreen({ name, email, roleName, units, theme }: AccountSc
             theme={theme}
             onChange={(change) => preferences.send({ unitSystem: change.units, theme: change.theme })}
           />
-          <p className="mt-4 text-soft">
-            A rate of 24 g/m² reads <Figure value={24} quantity="rate" />, and −6 °C reads{' '}
-            <Figure value={-6} quantity="temperature" />.
-          </p>
+          <dl className="mt-4 grid max-w-72 grid-cols-[1fr_auto] gap-x-6 gap-y-1 text-soft">
+            <dt>A rate reads</dt>
+            <dd className="text-right text-ink">
+              <Figure value={24} quantity="rate" digits={0} />
+            </dd>
+            <dt>A pavement temperature</dt>
+            <dd className="text-right text-ink">
+              <Figure value={-6.2} quantity="temperature" />
+            </dd>
+            <dt>A load of salt</dt>
+            <dd className="text-right text-ink">
+              <Figure value={7500} quantity="largeMass" />
+            </dd>
+          </dl>
         </Section>
         <Section title="Password">
           <p className="mb-4 max-w-prose text-soft">

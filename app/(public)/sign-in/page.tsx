@@ -46,7 +46,7 @@ export default async function SignInPage({ searchParams }: Readonly<{ searchPara
           <div>
             <h1 className="text-[1.75rem] leading-tight font-bold">Which road refreezes first?</h1>
             <p className="mt-1.5 text-soft">
-              {agency.name ? `Sign in to the winter desk of ${agency.name}.` : 'Sign in to the winter desk.'}
+              {agency.name ? `${agency.name}, winter desk.` : 'Sign in to the winter desk.'}
             </p>
           </div>
           {changed === 'password' ? (

@@ -112,7 +112,7 @@ export function SignInForm({ onwards, waitMin, demo }: SignInFormProps) {
           </h2>
           <p className="mb-2 text-sm text-soft">
             Demo people of an invented island. The password of all of them is{' '}
-            <span className="font-mono">{demo.password}</span>.
+            <span className="font-mono whitespace-nowrap">{demo.password}</span>.
           </p>
           <ul>
             {demo.people.map((person) => (

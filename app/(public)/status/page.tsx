@@ -55,10 +55,10 @@ export default async function StatusPage() {
       <main className="grid gap-6">
         <div>
           <h1 className="text-2xl font-bold">
-            {storm ? `Road treatment, storm ${String(storm.number).padStart(2, '0')}: ${storm.name}` : 'Road treatment'}
+            {storm ? `Roads treated in storm ${String(storm.number).padStart(2, '0')}` : 'Road treatment'}
           </h1>
           <p className="mt-1 text-soft">
-            As of {formatDayTime(now, agency.zone)}.
+            {storm ? `${storm.name}. ` : ''}As of {formatDayTime(now, agency.zone)}.
             {storm?.publishedAt
               ? ` Plan for pass ${storm.passNumber} published at ${formatTime(storm.publishedAt, agency.zone)}.`
               : ''}

@@ -25,15 +25,15 @@ const classWords: Readonly<Record<StatusRoad['serviceClass'], string>> = {
 };
 
 function State({ road }: Readonly<{ road: StatusRoad }>) {
-  if (road.treatedParts === 0) return <Tag tone="safe">not yet</Tag>;
+  if (road.treatedParts === 0) return <Tag tone="urgent">not yet</Tag>;
   if (road.treatedParts < road.parts) {
     return (
-      <Tag tone="urgent">
+      <Tag tone="closing">
         {road.treatedParts} of {road.parts} parts
       </Tag>
     );
   }
-  return <Tag tone="closing">treated</Tag>;
+  return <Tag tone="safe">treated</Tag>;
 }
 
 function ClassTable({

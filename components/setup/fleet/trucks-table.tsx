@@ -26,10 +26,13 @@ function rowsOf(trucks: readonly ListedTruck[], spreaders: readonly ListedSpread
   });
 }
 
+const lowerFirst = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
+
 function RateSpan({ spreader }: Readonly<{ spreader: ListedSpreader }>) {
   return (
     <>
-      <Figure value={spreader.minRateGPerM2} quantity="rate" digits={0} isUnitHidden /> to{' '}
+      <Figure value={spreader.minRateGPerM2} quantity="rate" digits={0} isUnitHidden />{' '}
+      <span className="font-sans">to</span>{' '}
       <Figure value={spreader.maxRateGPerM2} quantity="rate" digits={0} isUnitHidden />
     </>
   );
@@ -49,24 +52,23 @@ export function TrucksTable({ trucks, spreaders, onChoose }: TrucksTableProps) {
           head: 'Truck',
           isRowHead: true,
           className: 'min-w-36',
-          cell: ({ truck }) => (
+          cell: ({ truck, spreader }) => (
             <>
               Truck {truck.number}
               <span className="block text-sm font-normal text-soft">
-                {truck.name}
+                {truck.name}, {spreader ? lowerFirst(spreader.name) : 'no spreader'}
                 {truck.isActive ? '' : ', out of use'}
               </span>
             </>
           ),
         },
-        { key: 'yard', head: 'Yard', cell: ({ truck }) => truck.yardName },
+        { key: 'yard', head: 'Yard', className: 'whitespace-nowrap', cell: ({ truck }) => truck.yardName },
         {
           key: 'plough',
           head: 'Plough',
           isNumber: true,
           cell: ({ truck }) => <Figure value={truck.ploughWidthM} quantity="shortDistance" digits={1} />,
         },
-        { key: 'spreader', head: 'Spreader', className: 'min-w-36', cell: ({ spreader }) => spreader?.name ?? 'none' },
         {
           key: 'hopper',
           head: 'Hopper',
@@ -94,11 +96,11 @@ export function TrucksTable({ trucks, spreaders, onChoose }: TrucksTableProps) {
         {
           key: 'change',
           head: <span className="sr-only">Change</span>,
-          className: 'text-right whitespace-nowrap print:hidden',
+          className: 'space-x-3 text-right whitespace-nowrap print:hidden',
           cell: ({ truck, spreader }) => (
             <>
               <Button
-                size="small"
+                size="row"
                 variant="quiet"
                 aria-label={`Change truck ${truck.number}`}
                 onClick={() => onChoose({ kind: 'truck', id: truck.id })}
@@ -106,7 +108,7 @@ export function TrucksTable({ trucks, spreaders, onChoose }: TrucksTableProps) {
                 Truck
               </Button>
               <Button
-                size="small"
+                size="row"
                 variant="quiet"
                 aria-label={`${spreader ? 'Change' : 'Add'} the spreader of truck ${truck.number}`}
                 onClick={() => onChoose({ kind: 'spreader', id: spreader?.id ?? null, truckId: truck.id })}

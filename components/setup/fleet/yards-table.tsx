@@ -11,7 +11,7 @@ const degrees = (value: number, positive: string, negative: string) =>
 export function YardsTable({ yards, onChoose }: YardsTableProps) {
   return (
     <Table
-      caption="Yards"
+      caption="Yards and what they hold"
       rows={yards}
       rowKey={(yard) => yard.id}
       rowClassName={(yard) => (yard.isActive ? undefined : 'text-soft')}
@@ -46,7 +46,7 @@ export function YardsTable({ yards, onChoose }: YardsTableProps) {
           className: 'text-right print:hidden',
           cell: (yard) => (
             <Button
-              size="small"
+              size="row"
               variant="quiet"
               aria-label={`Change ${yard.name}`}
               onClick={() => onChoose({ kind: 'yard', id: yard.id })}

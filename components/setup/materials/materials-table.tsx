@@ -84,7 +84,7 @@ export function MaterialsTable({ materials, currency, onChange }: MaterialsTable
           className: 'text-right print:hidden',
           cell: (material) => (
             <Button
-              size="small"
+              size="row"
               variant="quiet"
               aria-label={`Change ${material.name}`}
               onClick={() => onChange(material.id)}

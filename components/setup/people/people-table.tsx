@@ -29,6 +29,7 @@ export function PeopleTable({ people, ownId, onChange }: PeopleTableProps) {
           key: 'name',
           head: 'Name',
           isRowHead: true,
+          className: 'min-w-36',
           cell: (person) => (
             <>
               {person.name}
@@ -41,19 +42,15 @@ export function PeopleTable({ people, ownId, onChange }: PeopleTableProps) {
         {
           key: 'state',
           head: 'May sign in',
-          cell: (person) => (person.isDisabled ? <Tag tone="frozen">disabled</Tag> : <Tag tone="closing">yes</Tag>),
+          className: 'whitespace-nowrap',
+          cell: (person) => (person.isDisabled ? <Tag tone="frozen">disabled</Tag> : 'yes'),
         },
         {
           key: 'change',
           head: <span className="sr-only">Change</span>,
           className: 'text-right print:hidden',
           cell: (person) => (
-            <Button
-              size="small"
-              variant="quiet"
-              onClick={() => onChange(person.id)}
-              aria-label={`Change ${person.name}`}
-            >
+            <Button size="row" variant="quiet" onClick={() => onChange(person.id)} aria-label={`Change ${person.name}`}>
               Change
             </Button>
           ),
