@@ -18,7 +18,8 @@ function addressOf(headers: Record<string, unknown> | undefined): string {
  */
 export function authOptions(): AuthOptions {
   return {
-    secret: env().NEXTAUTH_SECRET ?? 'development-only-secret',
+    // unset in development alone, where next-auth makes one of its own
+    secret: env().NEXTAUTH_SECRET,
     session: { strategy: 'jwt', maxAge: 14 * 60 * 60 },
     pages: { signIn: '/sign-in' },
     providers: [

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 
-const Environment = z.object({
+const Variables = z.object({
   DATABASE_URL: z.url({ protocol: /^postgres(ql)?$/, error: 'DATABASE_URL must be a postgres:// address' }),
   NEXTAUTH_URL: z.url().default('http://localhost:3000'),
   NEXTAUTH_SECRET: z.string().min(16, 'NEXTAUTH_SECRET must have at least 16 characters').optional(),
@@ -11,6 +11,14 @@ const Environment = z.object({
   /** Lines about slow or failed work go to standard output at this level. */
   LOG_LEVEL: z.enum(['silent', 'error', 'info']).default('info'),
 });
+
+const Environment = Variables.refine(
+  (given) => given.NODE_ENV !== 'production' || given.NEXTAUTH_SECRET !== undefined,
+  {
+    path: ['NEXTAUTH_SECRET'],
+    message: 'must be set in production: it signs the sessions',
+  },
+);
 
 export type Environment = z.infer<typeof Environment>;
 
