@@ -38,13 +38,13 @@ describe('the weather of Skerrow', () => {
     }
   });
 
-  it('falls to −7 ± 1 °C on the ridge about four hours after the anchor and thaws by ten', () => {
+  it('falls to −6.6 ± 0.8 °C on the ridge about four hours after the anchor and thaws by ten', () => {
     for (const anchorAt of anchors) {
       const ridge = Array.from({ length: 97 }, (_, step) => weatherAt(0, after(anchorAt, -6 + step / 6), anchorAt));
       const coldest = Math.min(...ridge.map(({ pavementTempC }) => pavementTempC));
       const coldestAtH = -6 + ridge.findIndex(({ pavementTempC }) => pavementTempC === coldest) / 6;
-      expect(coldest).toBeGreaterThan(-8);
-      expect(coldest).toBeLessThan(-6);
+      expect(coldest).toBeGreaterThan(-7.4);
+      expect(coldest).toBeLessThan(-5.8);
       expect(coldestAtH).toBeGreaterThan(2);
       expect(coldestAtH).toBeLessThan(6);
       expect(weatherAt(2, after(anchorAt, 10.5), anchorAt).pavementTempC).toBeGreaterThan(0);
@@ -59,8 +59,8 @@ describe('the weather of Skerrow', () => {
       const totalMm = readingsBetween({ fromAt: after(anchorAt, -9), untilAt: after(anchorAt, 10.5), anchorAt })
         .filter(({ stationIndex }) => stationIndex === 1)
         .reduce((sum, { precipitationMm }) => sum + precipitationMm, 0);
-      expect(totalMm).toBeGreaterThan(6);
-      expect(totalMm).toBeLessThan(14);
+      expect(totalMm).toBeGreaterThan(3);
+      expect(totalMm).toBeLessThan(6);
     }
   });
 

@@ -69,8 +69,17 @@ function rateMmPerH(stationIndex: number, atMs: number, anchorMs: number): numbe
   return isDamp && shower > 0 ? shower * 2.2 * patchy : 0;
 }
 
+/** What falls at the station itself: drizzle is thrown up by the hills more than snow is. */
+function fallingMmPerH(stationIndex: number, atMs: number, anchorMs: number): number {
+  const { precipitationFactor, drizzleFactor } = characterOf(stationIndex);
+  const hour = hoursFrom(atMs, anchorMs);
+  const { script, share } = stormShare(hour);
+  const isDrizzle = share > 0.5 && hour >= script.drizzleFromH;
+  return rateMmPerH(stationIndex, atMs, anchorMs) * (isDrizzle ? drizzleFactor : precipitationFactor);
+}
+
 function typeOf(hour: number, mmPerH: number, pavementTempC: number): PrecipitationType {
-  if (mmPerH < 0.03) return 'none';
+  if (mmPerH < 0.015) return 'none';
   const { script, share } = stormShare(hour);
   if (share <= 0.5) return mmPerH > 0.4 ? 'rain' : 'drizzle';
   if (hour < script.drizzleFromH) return 'snow';
@@ -81,7 +90,7 @@ function typeOf(hour: number, mmPerH: number, pavementTempC: number): Precipitat
 function waterMmAt(stationIndex: number, atMs: number, anchorMs: number): number {
   let waterMm = 0;
   for (let back = 0; back < 18; back += 1) {
-    waterMm += rateMmPerH(stationIndex, atMs - back * 1_200_000, anchorMs) * (1 / 3) * 0.5 ** (back / 3);
+    waterMm += fallingMmPerH(stationIndex, atMs - back * 1_200_000, anchorMs) * (1 / 3) * 0.5 ** (back / 3);
   }
   return waterMm;
 }
@@ -142,7 +151,7 @@ export function weatherAt(stationIndex: number, at: Date, anchorAt: Date): Stati
   const airC = openC + character.airOffsetC + aboveRoadC + 0.1 * noise(80 + stationIndex, hour);
   const openDryC = (1 - share) * (0.9 + 0.8 * noise(9, hour / 15)) * (1 - Math.min(0.75, frostC / 5));
   const dryC = 0.35 + openDryC + 0.1 * noise(90 + stationIndex, hour);
-  const mmPerH = rateMmPerH(stationIndex, atMs, anchorMs) * character.precipitationFactor;
+  const mmPerH = fallingMmPerH(stationIndex, atMs, anchorMs);
   const pavementTempC = rounded(pavementC, 1);
   const airTempC = rounded(airC, 1);
   const dewPointC = rounded(Math.min(airC, airC - Math.max(0.1, dryC)), 1);
