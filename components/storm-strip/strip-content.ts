@@ -1,4 +1,6 @@
-export type PrecipitationType = 'snow' | 'sleet' | 'rain' | 'freezing-rain' | 'frost';
+import { type PrecipitationType } from '@/lib/road/precipitation';
+
+export type { PrecipitationType };
 
 /** Times in ms since 1970; temperatures in °C, amounts in mm of water. */
 export interface StripContent {
@@ -17,9 +19,13 @@ export interface StripContent {
 }
 
 export const precipitationWords: Readonly<Record<PrecipitationType, string>> = {
+  none: '',
   snow: 'snow',
   sleet: 'sleet',
   rain: 'rain',
+  drizzle: 'drizzle',
   'freezing-rain': 'freezing rain',
+  'freezing-drizzle': 'freezing drizzle',
   frost: 'frost',
+  unknown: 'precipitation',
 };

@@ -7,11 +7,22 @@ import { rateOf, typeRuns, type StripFrame, type StripScales } from './strip-sca
 type LayerProps = Readonly<{ content: StripContent; frame: StripFrame; scales: StripScales }>;
 
 const fills: Readonly<Record<PrecipitationType, string>> = {
+  none: 'fill-none',
   snow: 'fill-hold',
   sleet: 'fill-hold',
   rain: 'fill-closing',
+  drizzle: 'fill-closing',
   'freezing-rain': 'fill-closing',
+  'freezing-drizzle': 'fill-closing',
   frost: 'fill-soft',
+  unknown: 'fill-soft',
+};
+
+const hatchOf: Readonly<Partial<Record<PrecipitationType, string>>> = {
+  sleet: 'sleet',
+  'freezing-rain': 'freezing',
+  'freezing-drizzle': 'freezing',
+  frost: 'frost',
 };
 
 /** A hatch over the bars of what freezes or is mixed, so that the type does not hang on colour. */
@@ -21,13 +32,7 @@ export function Hatches() {
       <pattern id="strip-sleet" width="6" height="6" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
         <rect width="2" height="6" className="fill-panel opacity-45" />
       </pattern>
-      <pattern
-        id="strip-freezing-rain"
-        width="5"
-        height="5"
-        patternUnits="userSpaceOnUse"
-        patternTransform="rotate(-45)"
-      >
+      <pattern id="strip-freezing" width="5" height="5" patternUnits="userSpaceOnUse" patternTransform="rotate(-45)">
         <rect width="2.2" height="5" className="fill-panel opacity-60" />
       </pattern>
       <pattern id="strip-frost" width="5" height="5" patternUnits="userSpaceOnUse">
@@ -52,7 +57,7 @@ export function Precipitation({ content, frame, scales }: LayerProps) {
           return (
             <g key={bar.fromAt}>
               <rect {...place} className={`${fills[bar.type]} ${isPast ? 'opacity-80' : 'opacity-45'}`} />
-              {bar.type === 'snow' || bar.type === 'rain' ? null : <rect {...place} fill={`url(#strip-${bar.type})`} />}
+              {hatchOf[bar.type] ? <rect {...place} fill={`url(#strip-${hatchOf[bar.type]})`} /> : null}
             </g>
           );
         })}

@@ -232,3 +232,11 @@ export async function listTrucksOut(): Promise<TruckOutRecord[]> {
       where r.finished_at is null order by t.number`,
   );
 }
+
+/** The storm closed last: something to look back at while none is under way. */
+export async function findNewestClosedStorm(): Promise<StormRecord | null> {
+  const rows = await selectRows<StormRecord>(
+    `select ${stormColumns} from storms where closed_at is not null order by closed_at desc limit 1`,
+  );
+  return rows[0] ?? null;
+}

@@ -94,7 +94,8 @@ export const StormStateView = z.object({
   stations: z.array(StationView),
   forecastIssuedAt: At.nullable(),
   passes: z.array(z.object({ number: z.int(), startsAt: At })),
-  materials: z.array(z.object({ id: z.int(), name: z.string(), form: z.string() })),
+  /** `mainSalt` is the one there is most of; null for grit */
+  materials: z.array(z.object({ id: z.int(), name: z.string(), form: z.string(), mainSalt: z.string().nullable() })),
   plan: PlanView.nullable(),
   planned: PlannedColumns.nullable(),
   /** the newest entry of each road that has one */

@@ -1,10 +1,5 @@
-import {
-  findOpenStorm,
-  findStorm,
-  findStormDataVersion,
-  listTrucksOut,
-  type StormRecord,
-} from '@/db/queries/storm-state';
+import { findStorm, findStormDataVersion, listTrucksOut, type StormRecord } from '@/db/queries/storm-state';
+import { salts, type Salt } from '@/lib/brine/salts';
 import { packSteps, toStep } from '@/lib/contracts/packed-steps';
 import { perUnit, plannedActions, precipitationWords, StormStateView } from '@/lib/contracts/storm-state';
 import { Problem } from '@/lib/problem';
@@ -100,6 +95,13 @@ function presentRoads(projected: readonly ProjectedRoad[], { axis, arrivals, roa
   };
 }
 
+function mainSaltOf(composition: Readonly<Partial<Record<Salt, number>>>): Salt | null {
+  return salts.reduce<Salt | null>(
+    (main, salt) => ((composition[salt] ?? 0) > (main ? (composition[main] ?? 0) : 0) ? salt : main),
+    null,
+  );
+}
+
 async function present(storm: StormRecord, now: Date, dataVersion: string): Promise<string> {
   const [facts, trucks] = await Promise.all([readStormFacts(storm, now), storm.closedAt ? [] : listTrucksOut()]);
   const view: StormStateView = {
@@ -115,7 +117,12 @@ async function present(storm: StormRecord, now: Date, dataVersion: string): Prom
     stations: presentStations(facts),
     forecastIssuedAt: facts.forecastIssuedAt,
     passes: facts.passes.map(({ number, startsAt }) => ({ number, startsAt: startsAt.getTime() })),
-    materials: [...facts.materials.values()].map(({ id, name, form }) => ({ id, name, form })),
+    materials: [...facts.materials.values()].map(({ id, name, form, composition }) => ({
+      id,
+      name,
+      form,
+      mainSalt: mainSaltOf(composition),
+    })),
     plan: facts.plan && {
       id: facts.plan.id,
       version: facts.plan.version,
@@ -149,8 +156,4 @@ export async function readStormStateText({ id, now }: { id: number; now: Date })
   // A failure is not kept: the next one who asks tries again.
   built.text.catch(() => states.get(id) === built && states.delete(id));
   return built;
-}
-
-export async function findOpenStormId(): Promise<number | null> {
-  return (await findOpenStorm())?.id ?? null;
 }

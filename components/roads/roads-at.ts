@@ -1,0 +1,107 @@
+import { styleCode } from '@/components/map/road-style';
+import { UNKNOWN_STEP } from '@/lib/contracts/packed-steps';
+import { NO_END } from '@/lib/contracts/storm-state';
+import { DRY_MM } from '@/lib/road/partition';
+import { endOf, indexAt, timeAt } from '@/lib/time/step-axis';
+import { type RoadNetwork } from './decode-roads';
+import { valueAt, type Storm } from './decode-storm';
+import { bandOf, marginBands, type MarginBand } from './margin-band';
+import { nextPassAt } from './next-pass';
+import { type RoadNow } from './road-now';
+
+const msPerMin = 60_000;
+/** A road whose stations are silent is not known from this long before now on. */
+const silentMs = 2 * 3_600_000;
+const missing = '2';
+
+/** Every road at one time of a storm, in the order of the map. */
+export interface RoadsAt {
+  readonly roads: readonly RoadNow[];
+  /** for the map, a style a road */
+  readonly styles: Uint8Array;
+  readonly counts: Readonly<Record<MarginBand, number>>;
+  /** minutes from the cursor to the end of what is forecast */
+  readonly longestMin: number;
+}
+
+function holdMinAt(storm: Storm, row: number, step: number): number | null {
+  const steps = storm.rows.holdSteps[row * storm.axis.count + step] ?? UNKNOWN_STEP;
+  if (steps === UNKNOWN_STEP) return null;
+  return steps === NO_END ? Infinity : steps * storm.axis.stepMin;
+}
+
+function bandAt(storm: Storm, row: number, step: number): MarginBand {
+  const isSilent = storm.view.statuses[row] === missing && timeAt(storm.axis, step) > storm.view.nowAt - silentMs;
+  if (isSilent) return 'unknown';
+  const waterMm = valueAt(storm, 'waterMm', { row, step });
+  return bandOf(valueAt(storm, 'marginC', { row, step }), waterMm !== null && waterMm < DRY_MM);
+}
+
+function passMinAt(storm: Storm, row: number, at: number): number | null {
+  const { passes, arrivalMin, nowAt } = storm.view;
+  const lastAt = storm.lastByRow.get(row)?.at ?? null;
+  const comesAt = nextPassAt({ passes, arrivalMin: arrivalMin[row] ?? null, lastAt, nowAt }, at);
+  return comesAt === null ? null : (comesAt - at) / msPerMin;
+}
+
+function roadAt(network: RoadNetwork, index: number, seen: { storm: Storm; step: number; at: number } | null): RoadNow {
+  const segment = network.segments[index];
+  const { id = -1, name = '', serviceClass = '' } = segment ?? {};
+  const row = seen?.storm.rowById.get(id);
+  const bare = { id, index, name, serviceClass };
+  if (!seen || row === undefined) {
+    return {
+      ...bare,
+      band: 'unknown',
+      pavementTempC: null,
+      freezeMarginC: null,
+      holdMin: null,
+      nextPassMin: null,
+      slackMin: null,
+      truckNumber: null,
+    };
+  }
+  const { storm, step, at } = seen;
+  const band = bandAt(storm, row, step);
+  const holdMin = band === 'unknown' ? null : holdMinAt(storm, row, step);
+  const nextPassMin = passMinAt(storm, row, at);
+  return {
+    ...bare,
+    band,
+    pavementTempC: valueAt(storm, 'pavementC', { row, step }),
+    freezeMarginC: band === 'unknown' ? null : valueAt(storm, 'marginC', { row, step }),
+    holdMin,
+    nextPassMin,
+    slackMin: holdMin === null || nextPassMin === null || holdMin === Infinity ? null : holdMin - nextPassMin,
+    truckNumber: storm.view.truckOf[row] ?? null,
+  };
+}
+
+/** All roads at a time of a storm; without a storm nothing is known of any. */
+export function roadsAt(network: RoadNetwork, storm: Storm | null, at: number): RoadsAt {
+  const seen = storm ? { storm, at, step: indexAt(storm.axis, at) } : null;
+  const roads = network.segments.map((_, index) => roadAt(network, index, seen));
+  const counts = Object.fromEntries(marginBands.map((band) => [band, 0])) as Record<MarginBand, number>;
+  for (const road of roads) counts[road.band] += 1;
+  return {
+    roads,
+    styles: Uint8Array.from(roads, (road) => styleCode(road.band)),
+    counts,
+    longestMin: storm ? Math.max(0, (endOf(storm.axis) - at) / msPerMin) : 0,
+  };
+}
+
+const never = Number.MAX_SAFE_INTEGER;
+
+/** What refreezes first stands first; of those alike the one with less slack, then the more important road. */
+export function byUrgency(a: RoadNow, b: RoadNow): number {
+  const hold = (road: RoadNow) => Math.min(never, road.holdMin ?? never);
+  const slack = (road: RoadNow) => Math.min(never, road.slackMin ?? (road.nextPassMin === null ? -never : never));
+  return (
+    hold(a) - hold(b) ||
+    slack(a) - slack(b) ||
+    a.serviceClass.localeCompare(b.serviceClass) ||
+    (a.freezeMarginC ?? never) - (b.freezeMarginC ?? never) ||
+    a.index - b.index
+  );
+}
