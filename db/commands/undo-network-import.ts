@@ -117,13 +117,13 @@ async function remove(tx: Tx, ids: readonly number[], now: Date): Promise<{ remo
     {},
     tx,
   );
-  const isUsed = references
-    .map(({ tableName, columnName }) => `exists (select 1 from ${tableName} r where r."${columnName}" = s.id)`)
-    .join(' or ');
+  const isUnused = references
+    .map(({ tableName, columnName }) => `and not exists (select 1 from ${tableName} r where r."${columnName}" = s.id)`)
+    .join(' ');
   const list = JSON.stringify(ids);
   const among = `s.id in (select jsonb_array_elements_text(cast(:list as jsonb))::int)`;
   const removed = await selectRows<{ id: number }>(
-    `delete from segments s where ${among} and not (${isUsed || 'false'}) returning s.id`,
+    `delete from segments s where ${among} ${isUnused} returning s.id`,
     { list },
     tx,
   );
@@ -135,7 +135,8 @@ async function removeNodes(tx: Tx, ids: readonly number[]): Promise<void> {
   await execute(
     tx,
     `delete from nodes n where n.id in (select jsonb_array_elements_text(cast(:list as jsonb))::int)
-        and not exists (select 1 from segments s where s.from_node_id = n.id or s.to_node_id = n.id)`,
+        and not exists (select 1 from segments s where s.from_node_id = n.id)
+        and not exists (select 1 from segments s where s.to_node_id = n.id)`,
     { list: JSON.stringify(ids) },
   );
 }

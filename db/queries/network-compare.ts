@@ -104,8 +104,8 @@ export async function listMissing(given: { source: string; keys: readonly string
     `select s.id, s.source_key as "sourceKey", s.name, s.service_class as "serviceClass", s.lanes,
             st_asgeojson(s.geometry, 6) as path
        from segments s join network_imports i on i.id = s.import_id
-      where i.source = :source and s.retired_at is null
-        and s.source_key not in (select jsonb_array_elements_text(cast(:keys as jsonb)))
+       left join jsonb_array_elements_text(cast(:keys as jsonb)) as kept (key) on kept.key = s.source_key
+      where i.source = :source and s.retired_at is null and kept.key is null
       order by s.id`,
     { source: given.source, keys: JSON.stringify(given.keys) },
     tx,
