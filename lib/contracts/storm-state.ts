@@ -1,10 +1,20 @@
 import { z } from 'zod';
+import { PlanOptions, PlanWhy } from './plans';
 
 export const StormStateParams = z.object({ id: z.coerce.number().int().positive() });
 export const PlannedWhyParams = z.object({
   id: z.coerce.number().int().positive(),
   segmentId: z.coerce.number().int().positive(),
 });
+
+/** Why a plan says so of one road, with what it was made from. Times are ms since 1970. */
+export const PlannedWhyView = z.object({
+  why: PlanWhy.nullable(),
+  options: PlanOptions,
+  forecastIssuedAt: z.number().nullable(),
+  policyVersion: z.int(),
+});
+export type PlannedWhyView = z.output<typeof PlannedWhyView>;
 
 /** How many whole numbers of a packed row (see `packed-steps.ts`) make one unit. */
 export const perUnit = {
@@ -61,6 +71,8 @@ const PlannedColumns = z.object({
   materials: z.array(z.int()),
   ratesGPerM2: z.array(z.number().nullable()),
   ratesMlPerM2: z.array(z.number().nullable()),
+  /** 1 where the plan ploughs too */
+  isPloughed: z.array(z.int()),
   /** index into `reasonTexts` */
   reasons: z.array(z.int()),
   reasonTexts: z.array(z.string()),

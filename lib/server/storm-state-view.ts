@@ -1,5 +1,6 @@
 import { findStorm, findStormDataVersion, listTrucksOut, type StormRecord } from '@/db/queries/storm-state';
 import { salts, type Salt } from '@/lib/brine/salts';
+import { type PlanRecord } from '@/db/queries/storm-plans';
 import { packSteps, toStep } from '@/lib/contracts/packed-steps';
 import { perUnit, plannedActions, precipitationWords, StormStateView } from '@/lib/contracts/storm-state';
 import { Problem } from '@/lib/problem';
@@ -32,7 +33,7 @@ function joined(rows: readonly Int16Array[], rowLength: number): string {
 function presentStations(facts: StormFacts): StormStateView['stations'] {
   return seriesOf({ ...facts, nowAt: facts.seenAt }).map((series, index) => ({
     id: series.stationId,
-    name: facts.stationRecords[index]?.name ?? '',
+    name: facts.stations[index]?.name ?? '',
     status: series.status,
     newestAt: series.newestAt,
     tempC: rowOf(series.tempsC, perUnit.tempC),
@@ -42,9 +43,15 @@ function presentStations(facts: StormFacts): StormStateView['stations'] {
   }));
 }
 
+/** The plan that the screen speaks of: the newest version. */
+const shownPlan = ({ plans }: StormFacts) =>
+  plans.reduce<PlanRecord | null>((newest, plan) => (newest && newest.version > plan.version ? newest : plan), null);
+
 function presentPlanned(facts: StormFacts): StormStateView['planned'] {
-  if (!facts.plan) return null;
-  const bySegment = new Map(facts.planned.map((planned) => [planned.segmentId, planned]));
+  const plan = shownPlan(facts);
+  if (!plan) return null;
+  const own = facts.planned.filter((planned) => planned.planId === plan.id);
+  const bySegment = new Map(own.map((planned) => [planned.segmentId, planned]));
   const rows = facts.roads.map((road) => bySegment.get(road.id) ?? null);
   const materialIds = [...facts.materials.keys()];
   const reasonTexts = [...new Set(rows.map((row) => row?.reason ?? ''))];
@@ -54,6 +61,7 @@ function presentPlanned(facts: StormFacts): StormStateView['planned'] {
     materials: rows.map((row) => (row?.materialId ? materialIds.indexOf(row.materialId) : -1)),
     ratesGPerM2: rows.map((row) => row?.rateGPerM2 ?? null),
     ratesMlPerM2: rows.map((row) => row?.rateMlPerM2 ?? null),
+    isPloughed: rows.map((row) => (row?.isPloughed ? 1 : 0)),
     reasons: rows.map((row) => placeOfReason.get(row?.reason ?? '') ?? 0),
     reasonTexts,
   };
@@ -76,8 +84,8 @@ function presentLast(facts: StormFacts): Pick<StormStateView, 'last' | 'treatedT
 
 const statusDigit = { current: '0', stale: '1', missing: '2' } as const;
 
-function presentRoads(projected: readonly ProjectedRoad[], { axis, arrivals, roads, stationRecords }: StormFacts) {
-  const stationIds = stationRecords.map((station) => station.id);
+function presentRoads(projected: readonly ProjectedRoad[], { axis, arrivals, roads, stations }: StormFacts) {
+  const stationIds = stations.map((station) => station.id);
   const column = (of: (road: ProjectedRoad) => Int16Array) => joined(projected.map(of), axis.count);
   return {
     marginC: column((road) => road.columns.marginC),
@@ -104,6 +112,7 @@ function mainSaltOf(composition: Readonly<Partial<Record<Salt, number>>>): Salt 
 
 async function present(storm: StormRecord, now: Date, dataVersion: string): Promise<string> {
   const [facts, trucks] = await Promise.all([readStormFacts(storm, now), storm.closedAt ? [] : listTrucksOut()]);
+  const plan = shownPlan(facts);
   const view: StormStateView = {
     stormId: storm.id,
     number: storm.number,
@@ -123,11 +132,11 @@ async function present(storm: StormRecord, now: Date, dataVersion: string): Prom
       form,
       mainSalt: mainSaltOf(composition),
     })),
-    plan: facts.plan && {
-      id: facts.plan.id,
-      version: facts.plan.version,
-      passNumber: facts.plan.passNumber,
-      publishedAt: at(facts.plan.publishedAt),
+    plan: plan && {
+      id: plan.id,
+      version: plan.version,
+      passNumber: plan.passNumber,
+      publishedAt: at(plan.publishedAt),
     },
     planned: presentPlanned(facts),
     ...presentLast(facts),
