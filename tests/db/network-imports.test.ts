@@ -3,6 +3,7 @@ import { applyNetworkImport } from '@/db/commands/apply-network-import';
 import { changeSegment } from '@/db/commands/change-segment';
 import { discardNetworkImport, previewNetworkImport, remapNetworkImport } from '@/db/commands/preview-network-import';
 import { undoNetworkImport } from '@/db/commands/undo-network-import';
+import { findAgency } from '@/db/queries/agency';
 import { compareNetwork } from '@/db/queries/network-compare';
 import {
   findNetworkImport,
@@ -120,6 +121,7 @@ describe('saving', () => {
     ]);
     for (const { lengthM, measuredM } of rows) expect(Math.abs(lengthM / measuredM - 1)).toBeLessThan(1e-6);
     expect(await listNetworkAttributions()).toEqual(['© Somebody']);
+    expect((await findAgency()).attribution).toBe('© Somebody');
   });
 
   it('twice is harmless, and so is saving from two places at once', async () => {
@@ -172,7 +174,7 @@ describe('saving', () => {
 });
 
 describe('undo', () => {
-  it('of the first load leaves nothing of it, twice is harmless, and it can be saved again', async () => {
+  it('of the first import leaves nothing of it, twice is harmless, and it can be saved again', async () => {
     const { id } = await preview(first, 'one');
     await apply(id);
     expect(await undoNetworkImport({ id, by, now: at(2) })).toMatchObject({ removed: 3, kept: 0 });
@@ -181,7 +183,7 @@ describe('undo', () => {
     expect(await apply(id, 4)).toMatchObject({ added: 3 });
   });
 
-  it('of a second load brings back every value, id and geometry of the first, bit for bit', async () => {
+  it('of a second import brings back every value, id and geometry of the first, bit for bit', async () => {
     await apply((await preview(first, 'one')).id);
     const before = await everything();
     const { id } = await preview(second, 'two');
@@ -191,7 +193,7 @@ describe('undo', () => {
     expect(await everything()).toEqual(before);
   });
 
-  it('is refused while a later load stands on it', async () => {
+  it('is refused while a later import stands on it', async () => {
     const one = await preview(first, 'one');
     await apply(one.id);
     await apply((await preview(second, 'two')).id, 5);
@@ -222,7 +224,7 @@ describe('undo', () => {
 });
 
 describe('changes by hand', () => {
-  it('are audited, no longer assumed, and outlive a repeated load', async () => {
+  it('are audited, no longer assumed, and outlive a repeated import', async () => {
     await apply((await preview(first, 'one')).id);
     const [road] = await listSetupSegments({ ...all, find: 'quay' });
     if (!road) throw new Error('no road');
