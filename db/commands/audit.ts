@@ -7,6 +7,8 @@ export interface AuditEntry {
   subjectKind: string;
   subjectId: string | number;
   detail?: Record<string, unknown>;
+  /** when it was done, where that is not now */
+  recordedAt?: Date;
 }
 
 /** The audit row of a command, in the command's own transaction: both happen or neither. */

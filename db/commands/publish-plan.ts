@@ -41,6 +41,7 @@ export async function publishPlanIn(tx: Tx, { planId, by, now }: PublishPlan): P
     subjectKind: 'plan',
     subjectId: planId,
     detail: { stormId: plan.stormId, passNumber: plan.passNumber, version: plan.version },
+    recordedAt: now,
   });
   return { planId };
 }

@@ -219,6 +219,7 @@ export async function workOutPlanIn(tx: Tx, command: WorkOutPlan): Promise<Worke
     subjectKind: 'plan',
     subjectId: worked.planId,
     detail: { stormId: command.stormId, passNumber: command.passNumber, version: worked.version },
+    recordedAt: command.now,
   });
   return worked;
 }

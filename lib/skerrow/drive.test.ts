@@ -74,6 +74,16 @@ describe('a driven route', () => {
     expect(run.entries.filter(({ outcome }) => outcome === 'skipped').length).toBeGreaterThan(0);
   });
 
+  it('stands at the loader with trucks 3 and 7 in the present pass, with roads still to do', () => {
+    for (const truckNumber of [3, 7]) {
+      const { run, roads } = drive(truckNumber, { storm: 7, pass: 3, hours: 1.9 });
+      expect(run.finishedAt).toBeNull();
+      expect(run.entries.length).toBeLessThan(roads.length);
+      const lastLoadAt = run.loads.at(-1)?.loadedAt.getTime() ?? 0;
+      expect(lastLoadAt).toBeGreaterThan(run.entries.at(-1)?.spreadAt.getTime() ?? Infinity);
+    }
+  });
+
   it('knows nothing of what has not happened yet', () => {
     const { run } = drive(8, { hours: 1 });
     expect(run.finishedAt).toBeNull();

@@ -112,8 +112,9 @@ function entryFor(road: RoadSegment, drive: Drive, at: { spreadAt: Date; random:
   const { skipped } = drive.departure;
   if (skipped && road.name.startsWith(skipped.road)) return { ...nothing, outcome: 'skipped', note: skipped.note };
   if (!ask?.materialName || !ask.rateGPerM2) {
-    return ask?.isPloughed
-      ? { ...nothing, outcome: 'ploughed', isPloughed: true }
+    if (ask?.isPloughed) return { ...nothing, outcome: 'ploughed', isPloughed: true };
+    return random() < 0.88
+      ? { ...nothing, outcome: 'ploughed', isPloughed: true, note: 'Nothing asked for, blade down once' }
       : { ...nothing, outcome: 'skipped', note: 'Nothing asked for, wet and clear' };
   }
   const set = setRate(ask.rateGPerM2, drive.departure.rateFactor ?? 1, random);
@@ -173,7 +174,20 @@ export function driveRoute(drive: Drive, random: Random): DrivenRun {
     run.entries.push(entryFor(road, drive, { spreadAt: new Date(Math.round(nowMs / 1000) * 1000), random }));
   });
   nowMs += (9 + 5 * random()) * minMs;
-  return asOf({ ...run, finishedAt: new Date(Math.round(nowMs / 1000) * 1000) }, drive.untilAt);
+  const known = asOf({ ...run, finishedAt: new Date(Math.round(nowMs / 1000) * 1000) }, drive.untilAt);
+  return drive.departure.isLoadingNow ? atTheLoader(known, drive, random) : known;
+}
+
+/** The same run, had it turned back a quarter of an hour before now to load for the roads that are left. */
+function atTheLoader(run: DrivenRun, drive: Drive, random: Random): DrivenRun {
+  const turnedMs = drive.untilAt.getTime() - 15 * minMs;
+  const entries = run.entries.filter(({ spreadAt }) => spreadAt.getTime() <= turnedMs);
+  const done = new Set(entries.map(({ segmentKey }) => segmentKey));
+  const left = drive.roads.filter(({ key }) => !done.has(key));
+  const neededKg = left.reduce((sum, road) => sum + massKg(road, drive.asks.get(road.key), 1), 0);
+  const load = takeLoad(drive, neededKg, { loadedAt: new Date(drive.untilAt.getTime() - 3 * minMs), random });
+  const loads = run.loads.filter(({ loadedAt }) => loadedAt.getTime() <= turnedMs);
+  return { ...run, finishedAt: null, entries, loads: load ? [...loads, load] : loads };
 }
 
 /** Only what has happened, and has reached the office, by then. */

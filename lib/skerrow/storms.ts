@@ -19,7 +19,7 @@ export const storms: readonly SkerrowStorm[] = [
     fromH: -152,
     untilH: -137,
     closedH: -135.5,
-    passesH: [-151.5, -148.5, -145.5, -142.5, -139.5],
+    passesH: [-151, -148.2, -145.4, -142.4, -139.7],
     publishedPasses: 5,
   },
   {
@@ -47,9 +47,13 @@ export interface Departure {
   /** roads at the end of the list that never get logged */
   unloggedAtEnd?: number;
   reliefDriver?: string;
+  /** at the demo's now the truck stands at the loader, in the middle of its run */
+  isLoadingNow?: boolean;
 }
 
 export const departures: readonly Departure[] = [
+  { stormNumber: 7, pass: 3, truckNumber: 3, isLoadingNow: true },
+  { stormNumber: 7, pass: 3, truckNumber: 7, isLoadingNow: true },
   { stormNumber: 6, pass: 'every', truckNumber: 4, rateFactor: 1.22 },
   { stormNumber: 6, pass: 3, truckNumber: 3, lateMin: 38 },
   {
