@@ -64,7 +64,12 @@ export function openProductDatabase(label) {
  * @param {string} databaseUrl
  */
 export async function runScript(script, args, databaseUrl) {
-  const env = { ...process.env, DATABASE_URL: databaseUrl, NODE_ENV: 'production' };
+  const env = {
+    ...process.env,
+    DATABASE_URL: databaseUrl,
+    NODE_ENV: 'production',
+    NEXTAUTH_SECRET: 'these scripts sign no sessions',
+  };
   const command = [process.execPath, '--import', 'tsx', path.join('scripts', script), ...args];
   const done = await run(command, { cwd: root, env, mayInterrupt: true });
   if (done.code !== 0) throw new Stop(`scripts/${script} ${args.join(' ')} failed:\n${done.stdout}${done.stderr}`);

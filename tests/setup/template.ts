@@ -44,7 +44,12 @@ async function make(client: pg.Client, adminUrl: string, name: string, kind: Kin
   );
   for (const old of rows) await client.query(`drop database if exists ${old.name} with (force)`);
   await client.query(`create database ${name}`);
-  const env = { ...process.env, DATABASE_URL: databaseUrlOf(adminUrl, name), NODE_ENV: 'production' as const };
+  const env = {
+    ...process.env,
+    DATABASE_URL: databaseUrlOf(adminUrl, name),
+    NODE_ENV: 'production' as const,
+    NEXTAUTH_SECRET: 'these scripts sign no sessions',
+  };
   for (const args of kind.scripts) {
     await script(process.execPath, ['--import', 'tsx', ...args], { cwd: root, env, maxBuffer: 64_000_000 });
   }
