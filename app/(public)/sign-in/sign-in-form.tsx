@@ -124,7 +124,7 @@ export function SignInForm({ onwards, waitMin, demo }: SignInFormProps) {
                 >
                   <span className="w-28 font-semibold">{person.roleName}</span>
                   <span className="flex-1 text-soft">{person.name}</span>
-                  <span className="text-sm text-faint">{person.email}</span>
+                  <span className="hidden text-sm text-faint sm:inline">{person.email}</span>
                 </button>
               </li>
             ))}
