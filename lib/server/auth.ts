@@ -3,7 +3,7 @@ import CredentialsProvider from 'next-auth/providers/credentials';
 import { z } from 'zod';
 import { signIn } from '@/db/commands/sign-in';
 import { Problem } from '@/lib/problem';
-import { env } from './env';
+import { sessionSecret } from './env';
 
 const Credentials = z.object({ email: z.string().min(3).max(200), password: z.string().min(1).max(200) });
 
@@ -19,7 +19,7 @@ function addressOf(headers: Record<string, unknown> | undefined): string {
 export function authOptions(): AuthOptions {
   return {
     // unset in development alone, where next-auth makes one of its own
-    secret: env().NEXTAUTH_SECRET,
+    secret: sessionSecret(),
     session: { strategy: 'jwt', maxAge: 14 * 60 * 60 },
     pages: { signIn: '/sign-in' },
     providers: [

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 
-const Variables = z.object({
+const Environment = z.object({
   DATABASE_URL: z.url({ protocol: /^postgres(ql)?$/, error: 'DATABASE_URL must be a postgres:// address' }),
   NEXTAUTH_URL: z.url().default('http://localhost:3000'),
   NEXTAUTH_SECRET: z.string().min(16, 'NEXTAUTH_SECRET must have at least 16 characters').optional(),
@@ -11,14 +11,6 @@ const Variables = z.object({
   /** Lines about slow or failed work go to standard output at this level. */
   LOG_LEVEL: z.enum(['silent', 'error', 'info']).default('info'),
 });
-
-const Environment = Variables.refine(
-  (given) => given.NODE_ENV !== 'production' || given.NEXTAUTH_SECRET !== undefined,
-  {
-    path: ['NEXTAUTH_SECRET'],
-    message: 'must be set in production: it signs the sessions',
-  },
-);
 
 export type Environment = z.infer<typeof Environment>;
 
@@ -39,4 +31,12 @@ export function env(): Environment {
 /** Tests point the process at their own database after modules have loaded. */
 export function resetEnv(): void {
   parsed = undefined;
+}
+
+/** Signs the sessions. Scripts that never see a session run without it; a server in production does not. */
+export function sessionSecret(): string | undefined {
+  const { NEXTAUTH_SECRET, NODE_ENV } = env();
+  if (NODE_ENV === 'production' && NEXTAUTH_SECRET === undefined)
+    throw new Error('NEXTAUTH_SECRET must be set in production: it signs the sessions.');
+  return NEXTAUTH_SECRET;
 }
