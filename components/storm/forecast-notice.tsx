@@ -27,7 +27,7 @@ export function ForecastNotice({ forecast, zone, nowAt }: ForecastNoticeProps) {
     <Notice
       tone={ageMin > OLD_AFTER_MIN ? 'caution' : 'info'}
       title={issued}
-      todo={`${until}It may be wrong near freezing: common errors are 1 °C at 6 h and 2 °C at 24 h.`}
+      todo={`${until}It may be wrong near freezing: common errors are 1\u00A0°C at 6\u00A0h and 2\u00A0°C at 24\u00A0h.`}
     />
   );
 }

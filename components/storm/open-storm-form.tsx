@@ -48,7 +48,7 @@ export function OpenStormForm({ submission, zone, nowAt }: OpenStormFormProps) {
       <Field label="Name" hint="What is coming: snow turning to freezing drizzle." error={fields.name}>
         <TextInput name="name" autoFocus maxLength={80} />
       </Field>
-      <div className="grid gap-4 sm:grid-cols-2">
+      <div className="grid gap-4">
         <Field label="From" hint={`Agency time, ${formatUtcOffset(nowAt, zone)}`} error={fields.fromAt}>
           <TextInput type="datetime-local" value={from} onChange={(event) => setFrom(event.target.value)} />
         </Field>

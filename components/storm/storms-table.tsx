@@ -3,7 +3,7 @@
 import Link from 'next/link';
 import { Table, type Column } from '@/components/ui/table';
 import { Tag } from '@/components/ui/tag';
-import { formatDayTime } from '@/lib/time/format';
+import { formatDateTime } from '@/lib/time/format';
 import { stormTitle } from './storm-words';
 
 export interface StormRowView {
@@ -42,14 +42,18 @@ export function StormsTable({ storms, zone }: StormsTableProps) {
       key: 'state',
       head: 'State',
       cell: (storm) =>
-        storm.closedAt === null ? <Tag tone="lamp">open</Tag> : <Tag>closed {formatDayTime(storm.closedAt, zone)}</Tag>,
+        storm.closedAt === null ? (
+          <Tag tone="lamp">open</Tag>
+        ) : (
+          <Tag>closed {formatDateTime(storm.closedAt, zone)}</Tag>
+        ),
     },
-    { key: 'from', head: 'From', className: 'whitespace-nowrap', cell: (storm) => formatDayTime(storm.fromAt, zone) },
+    { key: 'from', head: 'From', className: 'whitespace-nowrap', cell: (storm) => formatDateTime(storm.fromAt, zone) },
     {
       key: 'until',
       head: 'Until',
       className: 'whitespace-nowrap',
-      cell: (storm) => formatDayTime(storm.untilAt, zone),
+      cell: (storm) => formatDateTime(storm.untilAt, zone),
     },
     { key: 'passes', head: 'Passes', isNumber: true, cell: (storm) => storm.passes },
     {

@@ -3,7 +3,7 @@ import { type FilmParameters } from '../road/parameters';
 import { passOver, type Pass } from '../road/pass';
 import { brineShare, filmFreezingPointC, filmMassFraction } from '../road/partition';
 import { advanceFilm, settle } from '../road/step-film';
-import { type PromiseKind, targetBrineShare, targetOf } from './promise';
+import { type PromiseKind, targetBrineShare } from './promise';
 import { type RoadWeather } from './weather';
 
 /** A pass at a step of the series. */
@@ -69,7 +69,7 @@ function emptyProjection(count: number): Projection {
 
 function note(into: Projection, index: number, { film, tempC, promise }: Noted): void {
   const phi = brineShare(film);
-  const target = targetBrineShare(promise, targetOf(film), tempC);
+  const target = targetBrineShare(promise, film, tempC);
   into.freezeMarginC[index] = tempC - filmFreezingPointC(film);
   into.phi[index] = phi;
   into.waterMm[index] = waterMmOf(film);

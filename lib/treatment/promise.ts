@@ -12,8 +12,8 @@ const NO_ICE_SHARE: Readonly<Record<PromiseKind, number>> = { bare: 1, passable:
 /** Part of the loose-snow share that a class keeps. */
 const LOOSE_PART: Readonly<Record<PromiseKind, number>> = { bare: 1, passable: 1, low: 0.5 };
 
-/** Snow that fell within this long is still being ploughed and driven through, min; common practice, no source. */
-const RECENT_SNOW_MIN = 60;
+/** For this long after snow what a plough left of it still counts as snow, min: a cycle; common practice, no source. */
+const RECENT_SNOW_MIN = 180;
 /** W of a thin film at most, mm. */
 export const THIN_FILM_MM = 0.3;
 
@@ -28,28 +28,42 @@ export function looseFactor(tempC: number): number {
   return 1.7 + (3.3 * (-6 - tempC)) / 11;
 }
 
+/** mm of rain that a mm of snow turns to slush; common practice, no source. */
+const SLUSH_PER_SNOW = 2;
+
+/** What fell on a road since it was last bare; salt does not change it, so that more salt never makes a promise stricter. */
+export type Cover = Pick<Film, 'fellMm' | 'fellAsSnowMm' | 'sinceSnowMin'>;
+
 /**
- * Which promise the film is judged by. Snow and sleet, while they fall and for an hour after, or while they are most of
- * an unploughed cover of over 0.3 mm: loose snow. Frost, freezing rain, a wet road, and what a plough left: no ice.
- * Judged by what fell, not by what is left of it, so that more salt never makes the promise stricter.
+ * The part of a cover, 0 to 1, that is judged as a thin film in which no ice is allowed; the rest is snow or slush to be
+ * kept loose. Rain, frost and a wet road are thin film; of what falls on snow, only the first 0.3 mm and what is more than
+ * twice the snow, since the rest makes slush. Snow is kept loose while it falls, for a cycle after, and while over 0.3 mm of it lie unploughed; then what a plough left is a thin film too.
+ * 0.3 mm of ploughed snow with 0.2 mm of drizzle on it: 0.4.
  */
-export function targetOf(film: Pick<Film, 'fellMm' | 'fellAsSnowMm' | 'sinceSnowMin'>): Target {
-  const isMostlySnow = film.fellAsSnowMm > 0.5 * film.fellMm;
-  const isRecent = film.sinceSnowMin !== null && film.sinceSnowMin <= RECENT_SNOW_MIN;
-  const isCovered = isRecent || film.fellMm > THIN_FILM_MM + 1e-9;
-  return isMostlySnow && isCovered ? 'loose-snow' : 'no-ice';
+export function thinFilmPart({ fellMm, fellAsSnowMm, sinceSnowMin }: Cover): number {
+  if (fellMm <= 0) return 1;
+  const isRecent = sinceSnowMin !== null && sinceSnowMin <= RECENT_SNOW_MIN;
+  const snowMm = isRecent || fellAsSnowMm > THIN_FILM_MM + 1e-9 ? fellAsSnowMm : 0;
+  const restMm = fellMm - snowMm;
+  return Math.max(Math.min(THIN_FILM_MM, restMm), restMm - SLUSH_PER_SNOW * fellAsSnowMm) / fellMm;
+}
+
+/** The promise that asks for more of a cover. */
+export function targetOf(cover: Cover): Target {
+  return thinFilmPart(cover) > 0.5 ? 'no-ice' : 'loose-snow';
 }
 
 /**
- * The least brine share, 0 to 1, that keeps a promise at a pavement temperature in °C: for no ice 1 (bare), 0.8
- * (passable), 0.5 (low); for loose snow `looseBrineShare · looseFactor(T)`, half of it for low, never over 1.
- * Loose snow at −5.3 °C, bare: 0.158.
+ * The least brine share, 0 to 1, that keeps a promise on a cover at a pavement temperature in °C. No ice: 1 (bare), 0.8
+ * (passable), 0.5 (low). Loose snow: `looseBrineShare · looseFactor(T)`, half of it for low, never over the share for no
+ * ice. A cover of both takes each for its part. Snow at −5.3 °C, bare: 0.158.
  */
 export function targetBrineShare(
   promise: { kind: PromiseKind; looseBrineShare: number },
-  target: Target,
+  cover: Cover,
   tempC: number,
 ): number {
-  if (target === 'no-ice') return NO_ICE_SHARE[promise.kind];
-  return Math.min(1, LOOSE_PART[promise.kind] * promise.looseBrineShare * looseFactor(tempC));
+  const noIce = NO_ICE_SHARE[promise.kind];
+  const loose = Math.min(noIce, LOOSE_PART[promise.kind] * promise.looseBrineShare * looseFactor(tempC));
+  return loose + (noIce - loose) * thinFilmPart(cover);
 }

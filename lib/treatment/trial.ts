@@ -44,7 +44,7 @@ function judge(film: Film, at: { index: number; tempC: number }, promise: PassOv
     masses: { NaCl, CaCl2, MgCl2, KCl },
     phi: brineShare(film),
     target,
-    targetPhi: targetBrineShare(promise, target, tempC),
+    targetPhi: targetBrineShare(promise, film, tempC),
   };
 }
 
