@@ -6,6 +6,7 @@ import * as stormsAndPlans from './20261201T090400-create-storms-and-plans';
 import * as runs from './20261201T090500-create-runs';
 import * as auditLog from './20261201T090600-create-audit-log';
 import * as networkSources from './20261201T091000-mark-network-sources';
+import * as mergeReadings from './20261201T092000-merge-readings';
 import * as segmentEnds from './20261201T092500-index-segment-ends';
 
 /** In order; an imported list, since files cannot be looked up by name in a bundle. */
@@ -18,5 +19,6 @@ export const migrations = [
   { name: '20261201T090500-create-runs', ...runs },
   { name: '20261201T090600-create-audit-log', ...auditLog },
   { name: '20261201T091000-mark-network-sources', ...networkSources },
+  { name: '20261201T092000-merge-readings', ...mergeReadings },
   { name: '20261201T092500-index-segment-ends', ...segmentEnds },
 ];

@@ -1,6 +1,6 @@
 import { fDifferenceToC, fToC, inchToMm, knotsToMPerS, mileToKm } from '@/lib/units/convert';
 import { type PartialReading } from './read-row';
-import { type NumericQuantity, type ReadingQuantity } from './quantities';
+import { isWordQuantity, type NumericQuantity, type ReadingQuantity } from './quantities';
 
 /** The tests a value can fail. A flagged value is kept as it came; it is only not trusted without a look. */
 export const checkNames = [
@@ -79,7 +79,13 @@ const HELD_BY_ICE_C = 0.3;
 /** A clock this fast is nothing to speak of. */
 const CLOCK_SLACK_MS = 5 * 60_000;
 
+/** What one column's values are held against, and what came before. Plain fields: they are touched for every value. */
 interface Past {
+  readonly quantity: ReadingQuantity;
+  readonly lowest: number;
+  readonly highest: number;
+  readonly step: number;
+  readonly stuckAfterMs: number;
   goodMs: number;
   good: number;
   doubtedMs: number;
@@ -94,12 +100,23 @@ export interface Checker {
   readonly check: (reading: PartialReading) => Flags | null;
 }
 
-/**
- * Makes the checker of one upload for columns of these quantities; `nowMs` is what a clock is ahead of. Tests that need
- * two quantities are made where both are of the same row and instant.
- */
-export function createChecker(columns: readonly ReadingQuantity[], nowMs: number): Checker {
-  const pasts = columns.map((): Past => ({
+/** What failed, gathered for one reading. */
+class FlagSheet {
+  flags: Flags | null = null;
+  add(quantity: ReadingQuantity, name: CheckName): void {
+    this.flags ??= {};
+    (this.flags[quantity] ??= []).push(name);
+  }
+}
+
+function noPast(quantity: ReadingQuantity): Past {
+  const [lowest, highest] = isWordQuantity(quantity) ? [0, 0] : rangeLimits[quantity];
+  return {
+    quantity,
+    lowest,
+    highest,
+    step: stepLimits[quantity] ?? Infinity,
+    stuckAfterMs: stuckAfterMs[quantity] ?? Infinity,
     goodMs: NaN,
     good: 0,
     doubtedMs: NaN,
@@ -107,37 +124,40 @@ export function createChecker(columns: readonly ReadingQuantity[], nowMs: number
     sameSinceMs: NaN,
     lastMs: NaN,
     last: NaN,
-  }));
-  const at = (quantity: ReadingQuantity) => columns.indexOf(quantity);
-  const places = {
-    air: at('airTempC'),
-    dew: at('dewPointC'),
-    pavement: at('pavementTempC'),
-    wind: at('windSpeedMPerS'),
-    gust: at('windGustMPerS'),
-    status: at('surfaceStatus'),
   };
+}
+
+function placesOf(columns: readonly ReadingQuantity[]): Places {
+  return {
+    air: columns.indexOf('airTempC'),
+    dew: columns.indexOf('dewPointC'),
+    pavement: columns.indexOf('pavementTempC'),
+    wind: columns.indexOf('windSpeedMPerS'),
+    gust: columns.indexOf('windGustMPerS'),
+    status: columns.indexOf('surfaceStatus'),
+  };
+}
+
+/**
+ * Makes the checker of one upload for columns of these quantities; `nowMs` is what a clock is ahead of. Tests that need
+ * two quantities are made where both are of the same row and instant.
+ */
+export function createChecker(columns: readonly ReadingQuantity[], nowMs: number): Checker {
+  const pasts = columns.map(noPast);
+  const places = placesOf(columns);
   const check = ({ atMs, isTimeGuessed, values }: PartialReading): Flags | null => {
-    let flags: Flags | null = null;
-    const flag = (quantity: ReadingQuantity, name: CheckName) => {
-      flags ??= {};
-      (flags[quantity] ??= []).push(name);
-    };
-    for (let index = 0; index < columns.length; index += 1) {
+    const sheet = new FlagSheet();
+    const isAhead = atMs > nowMs + CLOCK_SLACK_MS;
+    for (let index = 0; index < pasts.length; index += 1) {
       const value = values[index];
-      const quantity = columns[index];
-      if (value === null || value === undefined || quantity === undefined) continue;
-      if (atMs > nowMs + CLOCK_SLACK_MS) flag(quantity, 'clock-ahead');
-      if (isTimeGuessed) flag(quantity, 'time-guessed');
-      if (typeof value === 'string') continue;
-      const [lowest, highest] = rangeLimits[quantity as NumericQuantity];
       const past = pasts[index];
-      if (value < lowest || value > highest) flag(quantity, 'range');
-      else if (past && isJump(past, quantity, { atMs, value })) flag(quantity, 'step');
-      if (past && isStuck(past, quantity, { atMs, value })) flag(quantity, 'stuck');
+      if (value === null || value === undefined || past === undefined) continue;
+      if (isAhead) sheet.add(past.quantity, 'clock-ahead');
+      if (isTimeGuessed) sheet.add(past.quantity, 'time-guessed');
+      if (typeof value === 'number') checkAlone(past, { atMs, value }, sheet);
     }
-    checkTogether(values, places, flag);
-    return flags;
+    checkTogether(values, places, sheet);
+    return sheet.flags;
   };
   return { check };
 }
@@ -147,13 +167,17 @@ interface Timed {
   value: number;
 }
 
+function checkAlone(past: Past, { atMs, value }: Timed, sheet: FlagSheet): void {
+  if (value < past.lowest || value > past.highest) sheet.add(past.quantity, 'range');
+  else if (isJump(past, atMs, value)) sheet.add(past.quantity, 'step');
+  if (past.stuckAfterMs !== Infinity && isStuck(past, atMs, value)) sheet.add(past.quantity, 'stuck');
+}
+
 /** A value that agrees with the last good one or with the last doubted one is good: a spike does not taint its return. */
-function isJump(past: Past, quantity: ReadingQuantity, { atMs, value }: Timed): boolean {
-  const limit = stepLimits[quantity];
-  if (limit === undefined) return false;
-  const isNear = (ms: number) => Math.abs(atMs - ms) <= STEP_WITHIN_MS;
-  const jumps = isNear(past.goodMs) && Math.abs(value - past.good) > limit;
-  const isConfirmed = isNear(past.doubtedMs) && Math.abs(value - past.doubted) <= limit;
+function isJump(past: Past, atMs: number, value: number): boolean {
+  const jumps = Math.abs(atMs - past.goodMs) <= STEP_WITHIN_MS && Math.abs(value - past.good) > past.step;
+  const isConfirmed =
+    jumps && Math.abs(atMs - past.doubtedMs) <= STEP_WITHIN_MS && Math.abs(value - past.doubted) <= past.step;
   if (jumps && !isConfirmed) {
     past.doubtedMs = atMs;
     past.doubted = value;
@@ -164,18 +188,17 @@ function isJump(past: Past, quantity: ReadingQuantity, { atMs, value }: Timed): 
   return false;
 }
 
-function isStuck(past: Past, quantity: ReadingQuantity, { atMs, value }: Timed): boolean {
-  const afterMs = stuckAfterMs[quantity];
-  if (afterMs === undefined) return false;
+function isStuck(past: Past, atMs: number, value: number): boolean {
   const isSame = Math.abs(value - past.last) < 0.05 && Math.abs(atMs - past.lastMs) <= STEP_WITHIN_MS;
+  past.lastMs = atMs;
   if (!isSame) {
     past.sameSinceMs = atMs;
     past.last = value;
+    return false;
   }
-  past.lastMs = atMs;
-  if (quantity === 'windSpeedMPerS' && value !== 0) return false;
-  if (quantity === 'pavementTempC' && Math.abs(value) <= HELD_BY_ICE_C) return false;
-  return Math.abs(atMs - past.sameSinceMs) >= afterMs;
+  if (past.quantity === 'windSpeedMPerS' && value !== 0) return false;
+  if (past.quantity === 'pavementTempC' && Math.abs(value) <= HELD_BY_ICE_C) return false;
+  return Math.abs(atMs - past.sameSinceMs) >= past.stuckAfterMs;
 }
 
 interface Places {
@@ -196,21 +219,21 @@ const ROUNDING = 0.051;
  * Dew point never above air, gust not below the mean nor 75 kt above it (MADIS, University of Utah); pavement 20 °C
  * below to 40 °C above the air, frozen status with the surface above +3 °C (common practice, no source).
  */
-function checkTogether(
-  values: PartialReading['values'],
-  places: Places,
-  flag: (quantity: ReadingQuantity, name: CheckName) => void,
-): void {
-  const numberAt = (index: number) => {
-    const value = values[index];
-    return typeof value === 'number' ? value : Number.NaN;
-  };
-  const air = numberAt(places.air);
-  const pavement = numberAt(places.pavement);
-  const wind = numberAt(places.wind);
-  const gust = numberAt(places.gust);
-  if (numberAt(places.dew) > air + ROUNDING) flag('dewPointC', 'above-air');
-  if (gust < wind - ROUNDING || gust > wind + FURTHEST_GUST_M_PER_S) flag('windGustMPerS', 'against-wind');
-  if (pavement - air < -20 || pavement - air > 40) flag('pavementTempC', 'against-air');
-  if (pavement > FROZEN_ABOVE_C && frozenWords.has(values[places.status])) flag('surfaceStatus', 'against-pavement');
+function checkTogether(values: PartialReading['values'], places: Places, sheet: FlagSheet): void {
+  const air = numberAt(values, places.air);
+  const pavement = numberAt(values, places.pavement);
+  const wind = numberAt(values, places.wind);
+  const gust = numberAt(values, places.gust);
+  if (numberAt(values, places.dew) > air + ROUNDING) sheet.add('dewPointC', 'above-air');
+  if (gust < wind - ROUNDING || gust > wind + FURTHEST_GUST_M_PER_S) sheet.add('windGustMPerS', 'against-wind');
+  if (pavement - air < -20 || pavement - air > 40) sheet.add('pavementTempC', 'against-air');
+  if (pavement > FROZEN_ABOVE_C && frozenWords.has(values[places.status])) {
+    sheet.add('surfaceStatus', 'against-pavement');
+  }
+}
+
+/** NaN, which compares with nothing, where there is no number. */
+function numberAt(values: PartialReading['values'], index: number): number {
+  const value = index < 0 ? null : values[index];
+  return typeof value === 'number' ? value : Number.NaN;
 }

@@ -56,10 +56,13 @@ export function createClockReader(clock: Clock): ClockReader {
 
 /** The offset of a wall-clock day on which it does not change; null on the two days of the year when it does. */
 function steadyOffsetMs(wallDay: number, zone: string): number | null {
-  // A day before and after in UTC surely enclose the day on any wall.
-  const before = utcOffsetMin((wallDay - 1) * DAY_MS, zone);
-  const after = utcOffsetMin((wallDay + 2) * DAY_MS, zone);
-  return before === after ? before * MINUTE_MS : null;
+  const offsetMs = (atMs: number) => utcOffsetMin(atMs, zone) * MINUTE_MS;
+  const before = offsetMs((wallDay - 1) * DAY_MS);
+  const after = offsetMs((wallDay + 2) * DAY_MS);
+  if (before === after) return before;
+  const first = offsetMs(wallDay * DAY_MS - Math.max(before, after));
+  const last = offsetMs((wallDay + 1) * DAY_MS - Math.min(before, after));
+  return first === last ? first : null;
 }
 
 /** The instants at which the wall showed this time, earlier first: none, one or two. */

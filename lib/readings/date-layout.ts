@@ -18,24 +18,40 @@ export type CompiledLayout = { ok: true; layout: DateLayout } | { ok: false; rea
 const DAY_MS = 86_400_000;
 const MINUTE_MS = 60_000;
 
-const tokens: Readonly<Record<string, string>> = {
-  yyyy: '(?<year>\\d{4})',
-  yy: '(?<year>\\d{2})',
-  MM: '(?<month>\\d{1,2})',
-  M: '(?<month>\\d{1,2})',
-  dd: '(?<day>\\d{1,2})',
-  d: '(?<day>\\d{1,2})',
-  HH: '(?<hour>\\d{1,2})',
-  H: '(?<hour>\\d{1,2})',
-  hh: '(?<hour>\\d{1,2})',
-  h: '(?<hour>\\d{1,2})',
-  mm: '(?<minute>\\d{2})',
-  ss: '(?<second>\\d{2}(?:\\.\\d+)?)',
-  a: '(?<half>[AaPp])\\.?[Mm]\\.?',
+type Part = 'year' | 'month' | 'day' | 'hour' | 'minute' | 'second' | 'half' | 'offset';
+
+interface Token {
+  part: Part;
+  source: string;
+}
+
+const tokens: Readonly<Record<string, Token>> = {
+  yyyy: { part: 'year', source: '(\\d{4})' },
+  yy: { part: 'year', source: '(\\d{2})' },
+  MM: { part: 'month', source: '(\\d{1,2})' },
+  M: { part: 'month', source: '(\\d{1,2})' },
+  dd: { part: 'day', source: '(\\d{1,2})' },
+  d: { part: 'day', source: '(\\d{1,2})' },
+  HH: { part: 'hour', source: '(\\d{1,2})' },
+  H: { part: 'hour', source: '(\\d{1,2})' },
+  hh: { part: 'hour', source: '(\\d{1,2})' },
+  h: { part: 'hour', source: '(\\d{1,2})' },
+  mm: { part: 'minute', source: '(\\d{2})' },
+  ss: { part: 'second', source: '(\\d{2}(?:\\.\\d+)?)' },
+  a: { part: 'half', source: '([AaPp])\\.?[Mm]\\.?' },
 };
 
-const iso =
-  '(?<year>\\d{4})-(?<month>\\d{2})-(?<day>\\d{2})(?:[T ](?<hour>\\d{2})(?::?(?<minute>\\d{2}))?(?::?(?<second>\\d{2}(?:[.,]\\d+)?))?)?\\s*(?<offset>Z|UTC|[+-]\\d{2}(?::?\\d{2})?)?';
+const iso: Compiled = {
+  source:
+    '(\\d{4})-(\\d{2})-(\\d{2})(?:[T ](\\d{2})(?::?(\\d{2}))?(?::?(\\d{2}(?:[.,]\\d+)?))?)?\\s*(Z|UTC|[+-]\\d{2}(?::?\\d{2})?)?',
+  parts: ['year', 'month', 'day', 'hour', 'minute', 'second', 'offset'],
+};
+
+interface Compiled {
+  source: string;
+  /** what each group of the expression is */
+  parts: Part[];
+}
 
 const daysInMonth = (year: number, month: number) => new Date(Date.UTC(year, month, 0)).getUTCDate();
 
@@ -68,14 +84,21 @@ function hourOf(text: string, half: string | undefined): number {
   return (hour % 12) + (half.toLowerCase() === 'p' ? 12 : 0);
 }
 
-function readParts(parts: Record<string, string | undefined>): WallTime | null {
-  const { year = '', month = '', day = '', hour = '0', minute = '0', second = '0', half, offset } = parts;
-  const minutes = Number(minute);
-  const seconds = Number(second.replace(',', '.'));
+/** Where in the match each part stands; 0 where the pattern has none. */
+type Places = Record<Part, number>;
+
+function readMatch(match: RegExpExecArray, places: Places): WallTime | null {
+  const minutes = places.minute === 0 ? 0 : Number(match[places.minute] ?? 0);
+  const seconds = places.second === 0 ? 0 : Number((match[places.second] ?? '0').replace(',', '.'));
   if (minutes > 59 || seconds >= 61) return null;
-  const dayMs = (hourOf(hour, half) * 60 + minutes) * MINUTE_MS + Math.round(seconds * 1000);
-  const wallMs = wallMsOf(fullYear(year), Number(month), Number(day), dayMs);
-  return wallMs === null ? null : { wallMs, offsetMin: offset ? offsetMinOf(offset) : null };
+  const half = places.half === 0 ? undefined : match[places.half];
+  const hour = hourOf(match[places.hour] ?? '0', half);
+  const dayMs = (hour * 60 + minutes) * MINUTE_MS + Math.round(seconds * 1000);
+  const year = fullYear(match[places.year] ?? '');
+  const wallMs = wallMsOf(year, Number(match[places.month]), Number(match[places.day]), dayMs);
+  if (wallMs === null) return null;
+  const offset = places.offset === 0 ? undefined : match[places.offset];
+  return { wallMs, offsetMin: offset ? offsetMinOf(offset) : null };
 }
 
 const epoch = (pattern: string, msPerUnit: number): DateLayout => ({
@@ -87,17 +110,18 @@ const epoch = (pattern: string, msPerUnit: number): DateLayout => ({
   },
 });
 
-function sourceOf(pattern: string): string | null {
+function compile(pattern: string): Compiled | null {
   if (pattern === 'iso') return iso;
-  let source = '';
-  for (const [part] of pattern.matchAll(/yyyy|yy|MM|M|dd|d|HH|H|hh|h|mm|ss|a|[^A-Za-z]|[A-Za-z]/g)) {
-    const token = tokens[part];
-    if (token) source += token;
-    else if (part === 'T') source += 'T';
-    else if (/[A-Za-z]/.test(part)) return null;
-    else source += part === ' ' ? '\\s+' : part.replace(/[.*+?^${}()|[\]\\/]/, '\\$&');
+  const compiled: Compiled = { source: '', parts: [] };
+  for (const [letters] of pattern.matchAll(/yyyy|yy|MM|M|dd|d|HH|H|hh|h|mm|ss|a|[^A-Za-z]|[A-Za-z]/g)) {
+    const token = tokens[letters];
+    if (token) {
+      compiled.source += token.source;
+      compiled.parts.push(token.part);
+    } else if (/[A-SU-Za-z]/.test(letters)) return null;
+    else compiled.source += letters === ' ' ? '\\s+' : letters.replace(/[.*+?^${}()|[\]\\/]/, '\\$&');
   }
-  return source;
+  return compiled;
 }
 
 /**
@@ -107,24 +131,30 @@ function sourceOf(pattern: string): string | null {
 export function compileLayout(pattern: string): CompiledLayout {
   if (pattern === 'epoch-s') return { ok: true, layout: epoch(pattern, 1000) };
   if (pattern === 'epoch-ms') return { ok: true, layout: epoch(pattern, 1) };
-  const source = sourceOf(pattern);
-  if (source === null) return { ok: false, reason: `“${pattern}” has a letter that is no part of a time.` };
-  const lacking = ['year', 'month', 'day', 'hour'].filter((part) => !source.includes(`<${part}>`));
+  const compiled = compile(pattern);
+  if (compiled === null) return { ok: false, reason: `“${pattern}” has a letter that is no part of a time.` };
+  const { source, parts } = compiled;
+  const needed: readonly Part[] = ['year', 'month', 'day', 'hour'];
+  const lacking = needed.filter((part) => !parts.includes(part));
   if (lacking.length > 0) return { ok: false, reason: `“${pattern}” says no ${lacking.join(' and no ')}.` };
-  let expression: RegExp;
-  try {
-    expression = new RegExp(`^${source}$`);
-  } catch {
+  if (new Set(parts).size < parts.length) {
     return { ok: false, reason: `“${pattern}” names a part of the time twice.` };
   }
-  return {
-    ok: true,
-    layout: {
-      pattern,
-      read: (text) => {
-        const groups = expression.exec(text)?.groups;
-        return groups ? readParts(groups) : null;
-      },
-    },
+  const expression = new RegExp(`^${source}$`);
+  const at = (part: Part) => parts.indexOf(part) + 1;
+  const places: Places = {
+    year: at('year'),
+    month: at('month'),
+    day: at('day'),
+    hour: at('hour'),
+    minute: at('minute'),
+    second: at('second'),
+    half: at('half'),
+    offset: at('offset'),
   };
+  const read = (text: string) => {
+    const match = expression.exec(text);
+    return match && readMatch(match, places);
+  };
+  return { ok: true, layout: { pattern, read } };
 }

@@ -3,13 +3,14 @@ import { isWordQuantity } from './quantities';
 import { factsOfUnit } from './units';
 import { readWord } from './words';
 
-/** A cell's value: SI number or word, `missing`, or why it cannot be read. */
-export type CellReading =
-  { kind: 'value'; value: number | string } | { kind: 'missing' } | { kind: 'bad'; reason: string };
+/** Why a cell cannot be read, as a sentence. */
+export class BadCell {
+  constructor(readonly reason: string) {}
+}
 
+/** SI number or word, null when missing, or why it cannot be read. Plain values: there is one for each cell of a file. */
+export type CellReading = number | string | null | BadCell;
 export type CellReader = (cell: string) => CellReading;
-
-const missing: CellReading = { kind: 'missing' };
 
 interface MissingCodes {
   texts: ReadonlySet<string>;
@@ -26,25 +27,27 @@ function codesOf(codes: readonly string[]): MissingCodes {
 
 const shortened = (text: string) => (text.length > 40 ? `${text.slice(0, 40)}…` : text);
 
-/** `0x1F` and `1e400` are numbers to a computer and none to a station. */
-const isPlain = (text: string) => !/[xXoObBI]/.test(text);
+/** `0x1F` is a number to a computer and none to a station. */
+const isPlain = (text: string) => text.length < 3 || text.charCodeAt(0) !== 48 || text.charCodeAt(1) < 65;
 
 function numberReader(column: ColumnMapping, decimalMark: '.' | ',', codes: MissingCodes): CellReader {
-  const facts = factsOfUnit(column.unit);
+  const toSi = factsOfUnit(column.unit)?.toSi;
   const { intervalMin } = column;
   const isComma = decimalMark === ',';
-  return (cell) => {
+  const hasCodes = codes.numbers.size > 0;
+  const read: CellReader = (cell) => {
     const text = cell.trim();
-    if (text === '') return missing;
+    if (text === '') return null;
     const value = Number(isComma ? text.replace('.', 'x').replace(',', '.') : text);
     if (Number.isFinite(value) && isPlain(text)) {
-      if (codes.numbers.size > 0 && codes.numbers.has(value)) return missing;
-      return { kind: 'value', value: facts ? facts.toSi(value, intervalMin) : value };
+      if (hasCodes && codes.numbers.has(value)) return null;
+      return toSi ? toSi(value, intervalMin) : value;
     }
-    if (codes.texts.has(text.toLowerCase())) return missing;
-    if (text.startsWith('\u2212')) return numberReader(column, decimalMark, codes)(`-${text.slice(1)}`);
-    return { kind: 'bad', reason: `“${shortened(text)}” is not a number${hintOf(text, isComma)}.` };
+    if (codes.texts.has(text.toLowerCase())) return null;
+    if (text.startsWith('\u2212')) return read(`-${text.slice(1)}`);
+    return new BadCell(`“${shortened(text)}” is not a number${hintOf(text, isComma)}.`);
   };
+  return read;
 }
 
 function hintOf(text: string, isComma: boolean): string {
@@ -60,12 +63,11 @@ export function createCellReader(column: ColumnMapping, mapping: Mapping): CellR
   if (!isWordQuantity(quantity)) return numberReader(column, mapping.decimalMark, codes);
   return (cell) => {
     const text = cell.trim();
-    if (text === '') return missing;
+    if (text === '') return null;
     const word = readWord(text, quantity);
-    if (word === 'missing') return missing;
-    if (word !== null) return { kind: 'value', value: word };
-    return codes.texts.has(text.toLowerCase())
-      ? missing
-      : { kind: 'bad', reason: `“${shortened(text)}” is not a word or code that is known here.` };
+    if (word === 'missing') return null;
+    if (word !== null) return word;
+    if (codes.texts.has(text.toLowerCase())) return null;
+    return new BadCell(`“${shortened(text)}” is not a word or code that is known here.`);
   };
 }

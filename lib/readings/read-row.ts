@@ -1,7 +1,7 @@
 import { createClockReader, type ClockReader } from './clock';
 import { type WallTime } from './date-layout';
 import { type Clock, type ColumnMapping, type Mapping, timeColumnsOf } from './mapping';
-import { createCellReader, type CellReader } from './read-cell';
+import { BadCell, createCellReader, type CellReader } from './read-cell';
 import { createTimeReader } from './read-time';
 import { quantityFacts } from './quantities';
 import { factsOfUnit, isOverInterval } from './units';
@@ -86,12 +86,11 @@ function readGroup(
   for (const { index, cellAt, name, read } of group.columns) {
     const cell = cells[cellAt];
     if (cell === undefined) continue;
-    const reading = read(cell);
-    if (reading.kind === 'bad') return { name, reason: reading.reason };
-    if (reading.kind === 'value') {
-      values ??= new Array<number | string | null>(count).fill(null);
-      values[index] = reading.value;
-    }
+    const value = read(cell);
+    if (value === null) continue;
+    if (value instanceof BadCell) return { name, reason: value.reason };
+    values ??= new Array<number | string | null>(count).fill(null);
+    values[index] = value;
   }
   return values && { atMs: 0, isTimeGuessed: false, values };
 }
@@ -108,30 +107,44 @@ export function openRowReader(mapping: Mapping, columnNames: readonly string[], 
   if (lacking.length > 0) return { ok: false, lacking };
   const indexOf = (column: string) => columnNames.indexOf(column);
   const readTime = createTimeReader(mapping.time, indexOf);
-  const groups = groupsOf(mapping, indexOf);
   const needed = Math.max(...wanted.map(indexOf)) + 1;
-  const count = mapping.columns.length;
-  const latestMs = nowMs + FURTHEST_AHEAD_MS;
-  const timeColumn = timeColumnsOf(mapping.time)[0] ?? '';
+  const plan = {
+    groups: groupsOf(mapping, indexOf),
+    count: mapping.columns.length,
+    latestMs: nowMs + FURTHEST_AHEAD_MS,
+    timeColumn: timeColumnsOf(mapping.time)[0] ?? '',
+  };
   const read = (cells: readonly string[]): RowReading => {
     if (cells.length < needed) return tooShort(cells, columnNames, needed);
     const timed = readTime(cells);
-    if (!timed.ok) return isHeadAgain(cells, columnNames) ? headAgain(timed.column) : timed;
-    const readings: PartialReading[] = [];
-    for (const group of groups) {
-      const reading = readGroup(group, cells, count);
-      const instant = instantOf(group, timed.time);
-      if (typeof instant === 'string') return { ok: false, column: timeColumn, reason: instant };
-      if (reading === null) continue;
-      if ('reason' in reading) return { ok: false, column: reading.name, reason: reading.reason };
-      reading.atMs = instant.atMs + group.shiftMs;
-      reading.isTimeGuessed = instant.isGuessed;
-      if (!(reading.atMs >= EARLIEST_MS && reading.atMs <= latestMs)) return outside(timeColumn, reading.atMs);
-      readings.push(reading);
-    }
-    return { ok: true, readings };
+    if (timed.ok) return readGroups(cells, timed.time, plan);
+    return isHeadAgain(cells, columnNames) ? headAgain(timed.column) : timed;
   };
-  return { ok: true, reader: { read, isOneClock: groups.length === 1 } };
+  return { ok: true, reader: { read, isOneClock: plan.groups.length === 1 } };
+}
+
+interface Plan {
+  groups: readonly Group[];
+  count: number;
+  latestMs: number;
+  timeColumn: string;
+}
+
+function readGroups(cells: readonly string[], time: WallTime, plan: Plan): RowReading {
+  const { groups, count, latestMs, timeColumn } = plan;
+  const readings: PartialReading[] = [];
+  for (const group of groups) {
+    const reading = readGroup(group, cells, count);
+    const instant = instantOf(group, time);
+    if (typeof instant === 'string') return { ok: false, column: timeColumn, reason: instant };
+    if (reading === null) continue;
+    if ('reason' in reading) return { ok: false, column: reading.name, reason: reading.reason };
+    reading.atMs = instant.atMs + group.shiftMs;
+    reading.isTimeGuessed = instant.isGuessed;
+    if (!(reading.atMs >= EARLIEST_MS && reading.atMs <= latestMs)) return outside(timeColumn, reading.atMs);
+    readings.push(reading);
+  }
+  return { ok: true, readings };
 }
 
 function tooShort(cells: readonly string[], columnNames: readonly string[], needed: number): RowReading {

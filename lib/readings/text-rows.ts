@@ -34,10 +34,10 @@ export function createRowSplitter(
   let pending = '';
   let line = 1;
 
-  const hand = (cells: string[]) => {
+  const hand = (cells: string[], hasQuotes: boolean) => {
     const at = line;
     line += 1;
-    if (cells.length > 0) line += lineEndsIn(cells);
+    if (hasQuotes) line += lineEndsIn(cells);
     const isBlank = cells.length === 1 && (cells[0] ?? '').trim() === '';
     if (at > skipLines && !isBlank) onRow(cells, at);
   };
@@ -47,7 +47,8 @@ export function createRowSplitter(
     const { data, errors, meta } = parser.parse(pending, 0, !isLast) as Parsed;
     const isOpen = isLast && errors.some(({ code }) => code === 'MissingQuotes');
     const rows = isOpen ? data.slice(0, -1) : data;
-    for (const cells of rows) hand(cells);
+    const hasQuotes = pending.includes(quote);
+    for (const cells of rows) hand(cells, hasQuotes);
     if (isOpen) return neverClosed(line);
     pending = isLast ? '' : pending.slice(meta.cursor);
     return pending.length > LONGEST_ROW ? neverClosed(line) : { ok: true };
