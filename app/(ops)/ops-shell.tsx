@@ -1,15 +1,13 @@
 'use client';
 
 import { signOut } from 'next-auth/react';
-import { useRouter } from 'next/navigation';
 import { type ReactNode } from 'react';
 import { type NavItem } from '@/components/shell/nav-items';
 import { type Theme, type Units } from '@/components/shell/preferences';
 import { Shell } from '@/components/shell/shell';
 import { useAnnounce } from '@/components/ui/announcements';
 import { UnitsProvider } from '@/components/ui/units';
-import { useSubmission } from '@/components/ui/use-submission';
-import { savePreferences } from './account/actions';
+import { usePreferences } from './use-preferences';
 
 export type OpsShellProps = Readonly<{
   items: readonly NavItem[];
@@ -22,16 +20,12 @@ export type OpsShellProps = Readonly<{
 }>;
 
 export function OpsShell({ items, agencyName, name, roleName, units, theme, children }: OpsShellProps) {
-  const router = useRouter();
   const announce = useAnnounce();
-  const preferences = useSubmission(savePreferences, () => router.refresh());
+  const preferences = usePreferences({ units, theme });
   const account = {
     name,
     roleName,
-    units,
-    theme,
-    onChange: (change: { units: Units; theme: Theme }) =>
-      preferences.send({ unitSystem: change.units, theme: change.theme }),
+    ...preferences,
     onSignOut: () => {
       announce('Signing out.');
       void signOut({ callbackUrl: '/sign-in' });

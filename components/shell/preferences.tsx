@@ -19,24 +19,14 @@ export const unitOptions: readonly { value: Units; label: string }[] = [
 export type PreferencesProps = Readonly<{
   units: Units;
   theme: Theme;
-  onChange: (change: { units: Units; theme: Theme }) => void;
+  onChange: (change: { units: Units } | { theme: Theme }) => void;
 }>;
 
 export function Preferences({ units, theme, onChange }: PreferencesProps) {
   return (
     <div className="grid gap-3">
-      <Segmented
-        label="Units"
-        options={unitOptions}
-        value={units}
-        onChange={(next) => onChange({ units: next, theme })}
-      />
-      <Segmented
-        label="Theme"
-        options={themeOptions}
-        value={theme}
-        onChange={(next) => onChange({ units, theme: next })}
-      />
+      <Segmented label="Units" options={unitOptions} value={units} onChange={(next) => onChange({ units: next })} />
+      <Segmented label="Theme" options={themeOptions} value={theme} onChange={(next) => onChange({ theme: next })} />
     </div>
   );
 }

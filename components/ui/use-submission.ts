@@ -28,6 +28,7 @@ const unreachable: ProblemView = {
 export function useSubmission<T>(
   act: (input: never) => Promise<ActionResult<T>>,
   onDone?: (result: T) => void,
+  onRefused?: (problem: ProblemView) => void,
 ): Submission<T> {
   const [isSending, startTransition] = useTransition();
   const [state, setState] = useState<{ problem: ProblemView | null; done: T | null }>({ problem: null, done: null });
@@ -37,8 +38,10 @@ export function useSubmission<T>(
         const result = await act(input as never);
         setState(result.ok ? { problem: null, done: result.data } : { problem: result.problem, done: null });
         if (result.ok) onDone?.(result.data);
+        else onRefused?.(result.problem);
       } catch {
         setState({ problem: unreachable, done: null });
+        onRefused?.(unreachable);
       }
     });
   const submit = (event: FormEvent<HTMLFormElement>) => {

@@ -8,9 +8,10 @@ export const NewPassword = z
   .min(shortestPassword, `A password has at least ${shortestPassword} characters.`)
   .max(200, 'A password has at most 200 characters.');
 
+/** What is not named stays as it is: two changes close together must not undo each other. */
 export const PreferencesInput = z.strictObject({
-  unitSystem: z.enum(['metric', 'us'], 'Choose metric or US units.'),
-  theme: z.enum(['system', 'dark', 'light'], 'Choose system, dark or light.'),
+  unitSystem: z.enum(['metric', 'us'], 'Choose metric or US units.').optional(),
+  theme: z.enum(['system', 'dark', 'light'], 'Choose system, dark or light.').optional(),
 });
 export type PreferencesInput = z.output<typeof PreferencesInput>;
 

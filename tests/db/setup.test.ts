@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { addPerson } from '@/db/commands/add-person';
 import { adoptPolicy } from '@/db/commands/adopt-policy';
 import { changePassword } from '@/db/commands/change-password';
+import { changePreferences } from '@/db/commands/change-preferences';
 import { changePerson } from '@/db/commands/change-person';
 import { disablePerson } from '@/db/commands/disable-person';
 import { saveMaterial } from '@/db/commands/save-material';
@@ -211,5 +212,13 @@ describe('policy', () => {
       [2, 'Ada First'],
       [1, 'Ada First'],
     ]);
+  });
+});
+
+describe('preferences', () => {
+  it('what is not named stays as it is', async () => {
+    await changePreferences({ input: { unitSystem: 'us' }, by: administratorId, now });
+    await changePreferences({ input: { theme: 'dark' }, by: administratorId, now });
+    expect(await findPerson({ id: administratorId })).toMatchObject({ unitSystem: 'us', theme: 'dark' });
   });
 });

@@ -1,19 +1,17 @@
 'use client';
 
 import { signOut } from 'next-auth/react';
-import { useRouter } from 'next/navigation';
 import { Preferences, type Theme, type Units } from '@/components/shell/preferences';
-import { useAnnounce } from '@/components/ui/announcements';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Figure } from '@/components/ui/figure';
 import { Form } from '@/components/ui/form';
-import { ProblemNotice } from '@/components/ui/notice';
 import { PageBody, PageHeader } from '@/components/ui/page-header';
 import { Section } from '@/components/ui/section';
 import { TextInput } from '@/components/ui/text-input';
 import { useSubmission } from '@/components/ui/use-submission';
-import { savePassword, savePreferences } from './actions';
+import { usePreferences } from '../use-preferences';
+import { savePassword } from './actions';
 
 export type AccountScreenProps = Readonly<{
   name: string;
@@ -49,12 +47,7 @@ function PasswordForm() {
 }
 
 export function AccountScreen({ name, email, roleName, units, theme }: AccountScreenProps) {
-  const router = useRouter();
-  const announce = useAnnounce();
-  const preferences = useSubmission(savePreferences, () => {
-    announce('Saved for every device you sign in on.');
-    router.refresh();
-  });
+  const preferences = usePreferences({ units, theme });
   return (
     <>
       <PageHeader
@@ -64,12 +57,7 @@ export function AccountScreen({ name, email, roleName, units, theme }: AccountSc
       />
       <PageBody className="max-w-4xl gap-10 md:grid-cols-2">
         <Section title="How things are shown">
-          <ProblemNotice problem={preferences.problem} className="mb-3" />
-          <Preferences
-            units={units}
-            theme={theme}
-            onChange={(change) => preferences.send({ unitSystem: change.units, theme: change.theme })}
-          />
+          <Preferences {...preferences} />
           <dl className="mt-4 grid max-w-72 grid-cols-[1fr_auto] gap-x-6 gap-y-1 text-soft">
             <dt>A rate reads</dt>
             <dd className="text-right text-ink">
