@@ -37,7 +37,21 @@ export function GroupsTable({ groups, currency }: GroupsTableProps) {
         </>
       ),
     },
-    { key: 'roads', head: 'Roads', isNumber: true, cell: ({ roads }) => roads },
+    {
+      key: 'roads',
+      head: 'Roads',
+      isNumber: true,
+      cell: ({ roads, shorterCycles }) => (
+        <>
+          {roads}
+          {shorterCycles > 0 ? (
+            <span className="block font-sans text-sm text-urgent">
+              {shorterCycles === roads ? 'all' : shorterCycles} on a shorter cycle
+            </span>
+          ) : null}
+        </>
+      ),
+    },
     {
       key: 'lanes',
       head: 'Lanes',

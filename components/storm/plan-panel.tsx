@@ -24,7 +24,9 @@ export function PlanPanel({ plan, currency, zone }: PlanPanelProps) {
           <GroupsTable groups={summary.groups} currency={currency} />
           {summary.exceptions.length > 0 ? (
             <div>
-              <h3 className="mb-2 font-bold">Beyond the limits until the next pass</h3>
+              <h3 className="mb-2 font-bold">
+                Beyond the limits until the next pass: {summary.exceptions.length} roads
+              </h3>
               <ExceptionsList exceptions={summary.exceptions} passAt={inputs.passAt} zone={zone} />
             </div>
           ) : null}

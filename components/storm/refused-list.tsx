@@ -25,7 +25,7 @@ export function RefusedList({ refused }: RefusedListProps) {
               },
               { system },
             )}
-            {neededRateGPerM2 !== null && roads > 1 ? ' on the worst of them' : ''}.
+            {neededRateGPerM2 !== null && limit !== 0 && roads > 1 ? ' on the worst of them' : ''}.
           </p>
           {alternatives[reason] ? <p className="text-sm text-soft">Instead: {alternatives[reason]}</p> : null}
         </li>

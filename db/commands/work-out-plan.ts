@@ -155,16 +155,21 @@ function inputsOf(gathered: Gathered, hasNextPass: boolean): PlanInputs {
   };
 }
 
+const lastsMin = ({ treatment }: PlannedRoad) => treatment.shorterCycle?.holdMin ?? 0;
+
 function summaryOf(gathered: Gathered, planned: readonly PlannedRoad[]): PlanSummary {
   const { segments: roads, materials } = gathered;
   const byId = new Map(roads.map((road) => [road.id, road]));
-  const exceptions = planned.flatMap(({ segmentId, treatment, parts }) => {
+  // Roads of the first class first, and of a class those that give out soonest.
+  const soonest = [...planned].sort((a, b) => lastsMin(a) - lastsMin(b));
+  const exceptions = soonest.flatMap(({ segmentId, treatment, parts }) => {
     const road = byId.get(segmentId);
     const isException = treatment.shorterCycle !== null || ['abrasives', 'undecided'].includes(treatment.action);
     if (!road || !isException) return [];
     const { name: roadName, serviceClass } = road;
     return [{ segmentId, roadName, serviceClass, action: treatment.action, parts: [...parts] }];
   });
+  exceptions.sort((a, b) => a.serviceClass.localeCompare(b.serviceClass));
   return { ...summarisePlan({ roads, planned, materials }), exceptions };
 }
 

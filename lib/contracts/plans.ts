@@ -110,6 +110,8 @@ export const PlanSummary = z.object({
       materialName: z.string().nullable(),
       form: form.nullable(),
       roads: z.int(),
+      /** of them, how many hold only with a shorter cycle */
+      shorterCycles: z.int().default(0),
       laneKm: number,
       /** lowest, middle and highest rate, g/m² */
       ratesGPerM2: z.tuple([number, number, number]).nullable(),

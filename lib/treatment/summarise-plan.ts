@@ -19,6 +19,7 @@ export interface SummaryGroup {
   materialName: string | null;
   form: MaterialForm | null;
   roads: number;
+  shorterCycles: number;
   laneKm: number;
   ratesGPerM2: [number, number, number] | null;
   massKg: number;
@@ -80,6 +81,7 @@ function groupOf(members: readonly { road: SummarisedRoad; planned: PlannedRoad 
     materialName: material?.name ?? null,
     form: material?.form ?? null,
     roads: members.length,
+    shorterCycles: members.filter(({ planned }) => planned.treatment.shorterCycle !== null).length,
     laneKm: members.reduce((sum, { road }) => sum + laneKmOf(road), 0),
     ratesGPerM2: spreadOf(members.flatMap(({ planned }) => planned.treatment.rateGPerM2 ?? [])),
     massKg,
