@@ -73,7 +73,7 @@ export function SignInForm({ onwards, waitMin, demo }: SignInFormProps) {
   };
   return (
     <div className="grid gap-8">
-      <form onSubmit={submit} className="grid gap-4">
+      <form method="post" onSubmit={submit} className="grid gap-4">
         {refusal ? <Notice tone="problem" title={refusal.title} todo={refusal.todo} /> : null}
         <Field label="E-mail address">
           <TextInput
