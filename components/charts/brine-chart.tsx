@@ -34,14 +34,14 @@ const pathOf = (points: readonly { x: number; y: number }[]) =>
   points.map((point, index) => `${index === 0 ? 'M' : 'L'}${point.x.toFixed(1)} ${point.y.toFixed(1)}`).join('');
 
 /** The freezing curve, with this road's brine sliding along its days towards it. */
-export function BrineChart({ content, zone, heightPx = 190, caption }: BrineChartProps) {
+export function BrineChart({ content, zone, heightPx = 172, caption }: BrineChartProps) {
   const system = useUnits();
   const [watch, widthPx] = useMeasuredWidth();
   const frame = brineFrame(widthPx, heightPx);
   const scales = brineScales(content, frame, system);
   const words = wordsFor(content, system, zone);
   return (
-    <figure ref={watch} className="min-w-0">
+    <figure ref={watch} className="relative min-w-0">
       {caption ? <figcaption className="mb-1 text-sm text-soft">{caption}</figcaption> : null}
       <svg
         aria-hidden

@@ -105,12 +105,13 @@ export function brineLabels(
     const width = widthOf(words.refreezes);
     labels.push(
       label('refreezes', words.refreezes, [
-        [x + 9, lineY + 5],
-        [x + 16, lineY + 22],
-        [x - width - 9, lineY - 18],
-        [x - width - 9, lineY + 6],
-        [x + 12, lineY - 20],
-        [x + 12, lineY - 36],
+        [x - width - 7, lineY + 5],
+        [x - width + 4, lineY + 20],
+        [x + 12, lineY - 19],
+        [x + 22, lineY + 4],
+        [frame.left + 4, lineY + 5],
+        [x + 12, lineY - 35],
+        [x + 60, lineY + 4],
       ]),
     );
   }
@@ -134,5 +135,11 @@ export function brineLabels(
     ]),
   );
   const line = { x: frame.left, y: lineY - 1.5, width: right - frame.left, height: 3 };
-  return placeLabels(labels, box, point ? [point, line] : [line]);
+  const curve = content.iceBranch.map(({ massFraction, tempC }) => ({
+    x: scales.x(massFraction) - 2,
+    y: scales.y(tempC) - 2,
+    width: 4,
+    height: 4,
+  }));
+  return placeLabels(labels, box, [...(point ? [point] : []), line, ...curve]);
 }

@@ -130,7 +130,7 @@ export function drawRoads(
 }
 
 /** Where everything is in trouble nothing stands out by a glow, and glow is what costs most to draw. */
-const MOST_GLOWING = 300;
+const MOST_GLOWING = 120;
 
 function glowingCount(lists: readonly number[][], classCount: number): number {
   let count = 0;
@@ -152,24 +152,25 @@ function strokePaths(pen: CanvasRenderingContext2D, glass: GlassPaths, paths: re
   }
 }
 
-/** A light ring under the chosen road and a thinner one under those pointed at. */
+/** A rim along the chosen road and a faint one under those pointed at. */
 function drawHalo(
   pen: CanvasRenderingContext2D,
   roads: RoadsToDraw,
   { palette, factor }: { palette: Palette; factor: number },
 ): void {
-  const ring = (path: number, extraPx: number, alpha: number) => {
+  const ring = (token: string, { path, extraPx, alpha }: { path: number; extraPx: number; alpha: number }) => {
     const widthPx = (roads.classes.widths[roads.classes.codes[path] ?? 0] ?? otherClassWidthPx) * factor;
     pen.globalAlpha = alpha;
-    pen.strokeStyle = palette['ink'] ?? '';
+    pen.strokeStyle = palette[token] ?? '';
     pen.lineWidth = widthPx + extraPx;
     pen.beginPath();
     tracePath(pen, roads.glass, path);
     pen.stroke();
     pen.globalAlpha = 1;
   };
-  for (const path of roads.highlighted) ring(path, 5, 0.45);
+  for (const path of roads.highlighted) ring('ink', { path, extraPx: 5, alpha: 0.45 });
   if (roads.selected === null) return;
-  ring(roads.selected, 15, 0.16);
-  ring(roads.selected, 6, 0.95);
+  ring('ink', { path: roads.selected, extraPx: 16, alpha: 0.14 });
+  ring('ink', { path: roads.selected, extraPx: 8, alpha: 1 });
+  ring('ground', { path: roads.selected, extraPx: 4, alpha: 1 });
 }

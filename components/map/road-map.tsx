@@ -71,7 +71,7 @@ export function RoadMap(props: RoadMapProps) {
         {props.focus ? <Focus key={props.focus.key} at={props.focus.at} /> : null}
         <ZoomButtons segments={segments} baseFeatures={baseFeatures} />
       </MapContainer>
-      {legend ? <div className="pointer-events-none absolute top-3 left-3 z-[500]">{legend}</div> : null}
+      {legend ? <div className="absolute top-3 left-3 z-[500] max-w-[calc(100%-1.5rem)]">{legend}</div> : null}
       {attribution ? (
         <p className="absolute right-0 bottom-0 z-[500] bg-ground/75 px-1.5 text-xs text-soft">{attribution}</p>
       ) : null}

@@ -58,7 +58,7 @@ function useFit({ segments, baseFeatures, fitKey, label }: RoadsProps): void {
   const map = useMap();
   const fittedFor = useRef(fitKey);
   const fit = useEffectEvent(() =>
-    map.fitBounds(boundsOf(segments, baseFeatures), { padding: [24, 24], animate: !isStill() }),
+    map.fitBounds(boundsOf(segments, baseFeatures), { padding: [24, 24], animate: false }),
   );
   useEffect(() => {
     if (fittedFor.current === fitKey) return;
@@ -70,10 +70,26 @@ function useFit({ segments, baseFeatures, fitKey, label }: RoadsProps): void {
     container.setAttribute('role', 'application');
     container.setAttribute('aria-roledescription', 'map');
     container.setAttribute('aria-label', `${label}. Arrow keys move the map, plus and minus zoom.`);
-    const observer = new ResizeObserver(() => map.invalidateSize({ animate: false, pan: false }));
-    observer.observe(container);
-    return () => observer.disconnect();
   }, [map, label]);
+  useEffect(() => {
+    // Until a person moves it, the map stays fitted whatever becomes of its window.
+    let isOwn = false;
+    const take = () => {
+      isOwn = true;
+    };
+    const container = map.getContainer();
+    const events = ['pointerdown', 'wheel', 'keydown'] as const;
+    for (const event of events) container.addEventListener(event, take, { passive: true });
+    const observer = new ResizeObserver(() => {
+      map.invalidateSize({ animate: false, pan: isOwn });
+      if (!isOwn && map.getSize().x > 0) fit();
+    });
+    observer.observe(container);
+    return () => {
+      observer.disconnect();
+      for (const event of events) container.removeEventListener(event, take);
+    };
+  }, [map]);
 }
 
 /** Brings a road chosen elsewhere into the window. */

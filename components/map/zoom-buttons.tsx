@@ -21,7 +21,7 @@ export function ZoomButtons({ segments, baseFeatures }: ZoomButtonsProps) {
   return (
     <div
       ref={box}
-      className="absolute right-3 bottom-7 z-[500] grid divide-y overflow-hidden rounded-md border shadow-lg"
+      className="absolute top-3 right-3 z-[500] md:top-auto md:bottom-7 grid divide-y overflow-hidden rounded-md border shadow-lg"
     >
       <button type="button" className={look} aria-label="Zoom in" onClick={() => map.zoomIn()}>
         +

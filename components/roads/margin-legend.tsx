@@ -1,5 +1,6 @@
 'use client';
 
+import { useState, useSyncExternalStore } from 'react';
 import { classNames } from '@/components/ui/class-names';
 import { useUnits } from '@/components/ui/units';
 import { bandRange, bandWords, marginBands, type MarginBand } from './margin-band';
@@ -13,6 +14,21 @@ const strokes: Readonly<Record<MarginBand, string>> = {
   unknown: 'border-safe border-dotted',
 };
 
+const roomy = '(min-width: 48rem)';
+
+/** On a phone the legend begins folded, since it would cover half the map. */
+function useIsRoomy(): boolean {
+  return useSyncExternalStore(
+    (listener) => {
+      const media = matchMedia(roomy);
+      media.addEventListener('change', listener);
+      return () => media.removeEventListener('change', listener);
+    },
+    () => matchMedia(roomy).matches,
+    () => true,
+  );
+}
+
 export type MarginLegendProps = Readonly<{
   /** "04:10" */
   time: string;
@@ -23,11 +39,21 @@ export type MarginLegendProps = Readonly<{
 /** What the lines on the map mean, worst first, with how many roads each holds. */
 export function MarginLegend({ time, counts, className }: MarginLegendProps) {
   const system = useUnits();
+  const isRoomy = useIsRoomy();
+  const [isOpenByHand, setIsOpen] = useState<boolean | null>(null);
+  const isOpen = isOpenByHand ?? isRoomy;
   const shown = [...marginBands].reverse().filter((band) => band !== 'unknown' || counts.unknown > 0);
   return (
-    <div className={classNames('rounded-md border bg-panel/95 px-3.5 py-2.5 shadow-lg', className)}>
-      <p className="mb-1 font-semibold">Freeze margin at {time}</p>
-      <table className="text-sm">
+    <details
+      open={isOpen}
+      onToggle={(event) => setIsOpen(event.currentTarget.open)}
+      className={classNames('group rounded-md border bg-panel/95 px-3.5 py-2 shadow-lg', className)}
+    >
+      <summary className="flex items-baseline justify-between gap-6 font-semibold [&::-webkit-details-marker]:hidden">
+        Freeze margin at {time}
+        <span className="text-sm font-normal text-soft">{isOpen ? 'hide' : 'legend'}</span>
+      </summary>
+      <table className="mt-1 text-sm">
         <thead className="sr-only">
           <tr>
             <th scope="col">Margin</th>
@@ -51,6 +77,6 @@ export function MarginLegend({ time, counts, className }: MarginLegendProps) {
           ))}
         </tbody>
       </table>
-    </div>
+    </details>
   );
 }

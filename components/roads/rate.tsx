@@ -23,6 +23,7 @@ export function Rate({ treatment }: Readonly<{ treatment: Treatment }>) {
         className="text-lamp"
       />
       <span className="text-soft">
+        {treatment.isPloughed ? 'plough, then ' : ''}
         {treatment.materialName ?? actionWords[treatment.action]},{' '}
         <UnitsProvider system={system === 'metric' ? 'us' : 'metric'}>
           <Figure value={value} quantity={quantity} size="inline" digits={0} />

@@ -18,6 +18,7 @@ export type RefreezeListProps = Readonly<{
 }>;
 
 const shownAtFirst = 40;
+const heads = ['hold', 'next', 'slack'];
 const ignore = () => undefined;
 
 /** Which road refreezes first, and will a truck be there before it does: the map's twin in words. */
@@ -36,16 +37,21 @@ export function RefreezeList({
       ? undefined
       : roads.find((road) => road.id === selectedId);
   return (
-    <section aria-label="Refreezes first" className={classNames('flex min-h-0 flex-col', className)}>
-      <header className="flex items-baseline gap-2 border-b px-4 py-2">
-        <h2 className="flex-1 font-bold">Refreezes first</h2>
-        {['hold', 'next pass', 'slack'].map((word) => (
-          <span key={word} aria-hidden className="w-[3.75rem] text-right text-sm whitespace-nowrap text-soft">
+    <section aria-label="Refreezes first" className={classNames('@container flex min-h-0 flex-col', className)}>
+      <header className="flex items-baseline gap-1.5 border-b px-4 py-2 @sm:gap-2">
+        <h2 className="flex-1 font-bold whitespace-nowrap">Refreezes first</h2>
+        {heads.map((word) => (
+          <span
+            key={word}
+            aria-hidden
+            className="w-[3.1rem] text-right text-sm whitespace-nowrap text-soft @sm:w-[3.75rem]"
+          >
             {word}
+            {word === 'next' ? <span className="hidden @sm:inline"> pass</span> : null}
           </span>
         ))}
       </header>
-      <div className="min-h-0 flex-1 overflow-y-auto">
+      <div className="relative min-h-0 flex-1 overflow-y-auto">
         <ol>
           {[...shown, ...(chosen ? [chosen] : [])].map((road) => (
             <RefreezeRow

@@ -16,11 +16,11 @@ export type RefreezeRowProps = Readonly<{
 }>;
 
 const barSpanMin = 180;
+const figureLook = 'w-[3.1rem] shrink-0 text-right font-mono whitespace-nowrap @sm:w-[3.75rem]';
 
 /** One road: name, hold, next pass and slack; under them the bar and what else tells roads apart. */
 export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: RefreezeRowProps) {
   const isLate = road.slackMin !== null && road.slackMin < 0;
-  const figure = 'w-[3.75rem] text-right font-mono whitespace-nowrap';
   return (
     <li className="[contain-intrinsic-size:auto_3.75rem] [content-visibility:auto]">
       <button
@@ -30,15 +30,15 @@ export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: R
         onPointerEnter={() => onPoint(road.id)}
         onPointerLeave={() => onPoint(null)}
         className={classNames(
-          'grid w-full gap-1 border-b border-l-[3px] border-l-transparent py-2 pr-4 pl-[0.8125rem] text-left transition-colors hover:bg-raised focus-visible:-outline-offset-2',
+          'relative grid w-full grid-cols-[minmax(0,1fr)] gap-1 border-b border-l-[3px] border-l-transparent py-2 pr-4 pl-[0.8125rem] text-left transition-colors hover:bg-raised focus-visible:-outline-offset-2',
           isChosen && 'border-l-lamp bg-raised',
         )}
       >
-        <span className="flex items-baseline gap-2">
+        <span className="flex items-baseline gap-1.5 @sm:gap-2">
           <span className="min-w-0 flex-1 truncate font-semibold">{road.name}</span>
           <span
             className={classNames(
-              figure,
+              figureLook,
               road.band === 'frozen'
                 ? 'text-frozen'
                 : road.band === 'urgent'
@@ -51,11 +51,11 @@ export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: R
             <span className="sr-only">holds </span>
             {holdInFigures(road.holdMin, longestMin)}
           </span>
-          <span className={classNames(figure, 'text-soft')}>
+          <span className={classNames(figureLook, 'text-soft')}>
             <span className="sr-only">next pass in </span>
             {holdInFigures(road.nextPassMin, longestMin)}
           </span>
-          <span className={classNames(figure, isLate ? 'font-semibold text-frozen' : 'text-soft')}>
+          <span className={classNames(figureLook, isLate ? 'font-semibold text-frozen' : 'text-soft')}>
             <span className="sr-only">slack </span>
             {road.slackMin === null || !Number.isFinite(road.slackMin) ? '\u2013' : formatDuration(road.slackMin, true)}
           </span>

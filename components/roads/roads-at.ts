@@ -93,14 +93,14 @@ export function roadsAt(network: RoadNetwork, storm: Storm | null, at: number): 
 
 const never = Number.MAX_SAFE_INTEGER;
 
-/** What refreezes first stands first; of those alike the one with less slack, then the more important road. */
+/** What refreezes first stands first; of those alike the more important road, then the one with less slack. */
 export function byUrgency(a: RoadNow, b: RoadNow): number {
   const hold = (road: RoadNow) => Math.min(never, road.holdMin ?? never);
   const slack = (road: RoadNow) => Math.min(never, road.slackMin ?? (road.nextPassMin === null ? -never : never));
   return (
     hold(a) - hold(b) ||
-    slack(a) - slack(b) ||
     a.serviceClass.localeCompare(b.serviceClass) ||
+    slack(a) - slack(b) ||
     (a.freezeMarginC ?? never) - (b.freezeMarginC ?? never) ||
     a.index - b.index
   );

@@ -13,6 +13,8 @@ export const actionWords: Readonly<Record<TreatmentAction, string>> = {
 /** What a plan says of a road. Rates are of product. */
 export interface Treatment {
   readonly action: TreatmentAction;
+  /** the plough goes before the spreader */
+  readonly isPloughed: boolean;
   readonly materialName: string | null;
   readonly rateGPerM2: number | null;
   readonly rateMlPerM2: number | null;

@@ -108,7 +108,10 @@ export const StormStateView = z.object({
   passes: z.array(z.object({ number: z.int(), startsAt: At })),
   /** `mainSalt` is the one there is most of; null for grit */
   materials: z.array(z.object({ id: z.int(), name: z.string(), form: z.string(), mainSalt: z.string().nullable() })),
+  /** the newest version */
   plan: PlanView.nullable(),
+  /** the newest version of each pass under way or to come */
+  plans: z.array(PlanView),
   planned: PlannedColumns.nullable(),
   /** the newest entry of each road that has one */
   last: z.array(

@@ -47,6 +47,13 @@ function presentStations(facts: StormFacts): StormStateView['stations'] {
 const shownPlan = ({ plans }: StormFacts) =>
   plans.reduce<PlanRecord | null>((newest, plan) => (newest && newest.version > plan.version ? newest : plan), null);
 
+const presentPlan = ({ id, version, passNumber, publishedAt }: PlanRecord) => ({
+  id,
+  version,
+  passNumber,
+  publishedAt: at(publishedAt),
+});
+
 function presentPlanned(facts: StormFacts): StormStateView['planned'] {
   const plan = shownPlan(facts);
   if (!plan) return null;
@@ -132,12 +139,8 @@ async function present(storm: StormRecord, now: Date, dataVersion: string): Prom
       form,
       mainSalt: mainSaltOf(composition),
     })),
-    plan: plan && {
-      id: plan.id,
-      version: plan.version,
-      passNumber: plan.passNumber,
-      publishedAt: at(plan.publishedAt),
-    },
+    plan: plan && presentPlan(plan),
+    plans: facts.plans.map(presentPlan),
     planned: presentPlanned(facts),
     ...presentLast(facts),
     trucksOut: trucks.map((truck) => ({ ...truck, lastLoggedAt: at(truck.lastLoggedAt) })),

@@ -10,7 +10,7 @@ type PointedRoadProps = Readonly<{ road: RoadNow; longestMin: number; onOpen: ()
 /** On a phone the map has the window to itself: the chosen road lies over its foot. */
 export function PointedRoad({ road, longestMin, onOpen }: PointedRoadProps) {
   return (
-    <div className="absolute inset-x-3 bottom-3 z-[500] flex items-center gap-3 rounded-md border bg-panel/95 py-2 pr-2 pl-3 shadow-lg md:hidden">
+    <div className="absolute inset-x-3 bottom-7 z-[500] flex items-center gap-3 rounded-md border bg-panel/95 py-2 pr-2 pl-3 shadow-lg md:hidden">
       <div className="min-w-0 flex-1">
         <p className="truncate font-semibold">{road.name}</p>
         <p className="flex gap-3 text-sm text-soft">

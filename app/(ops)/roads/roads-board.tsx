@@ -83,7 +83,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
         onChange={setView}
         className="border-b bg-panel px-3 py-1.5 md:hidden"
       />
-      <div className="grid min-h-0 flex-1 grid-cols-1 grid-rows-[minmax(0,1fr)] md:max-lg:grid-cols-2 md:max-lg:grid-rows-[minmax(0,1fr)_minmax(0,1fr)] lg:grid-cols-[minmax(0,1fr)_23.5rem] lg:grid-rows-[minmax(0,1fr)_auto] xl:grid-cols-[minmax(0,1fr)_27rem]">
+      <div className="grid min-h-0 flex-1 grid-cols-1 grid-rows-[minmax(0,1fr)] md:max-lg:grid-cols-2 md:max-lg:grid-rows-[minmax(0,1fr)_minmax(0,1fr)] lg:grid-cols-[minmax(0,1fr)_23.5rem] lg:grid-rows-[minmax(16.5rem,1fr)_minmax(0,auto)] xl:grid-cols-[minmax(0,1fr)_27rem]">
         <div className={classNames('relative min-h-0 md:max-lg:col-span-2 lg:row-span-2', onPhone('map'))}>
           <RoadMap
             segments={network.segments}
@@ -95,7 +95,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
             describe={describe}
             trucks={storm ? trucksOf(storm, zone) : []}
             fitKey={network.version}
-            legend={storm ? <MarginLegend time={time} counts={shown.counts} className="hidden sm:block" /> : null}
+            legend={storm ? <MarginLegend time={time} counts={shown.counts} /> : null}
             attribution={network.attribution}
             label={`Roads by freeze margin at ${time}`}
           />
@@ -118,7 +118,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
             />
             <ChosenPanel
               className={classNames(
-                'min-h-0 overflow-y-auto border-t-2 border-t-lamp bg-panel md:max-lg:border-t-0 md:border-l lg:max-h-[58vh]',
+                'min-h-0 overflow-y-auto border-t-2 border-t-lamp bg-panel md:max-lg:border-t-0 md:border-l',
                 onPhone('road'),
               )}
               storm={storm}
@@ -140,7 +140,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
       </div>
       {storm ? (
         <StormStrip
-          className="h-[9.25rem] shrink-0 border-t bg-panel md:h-[11rem] print:hidden"
+          className="h-[9.25rem] shrink-0 border-t bg-panel md:h-[10rem] xl:h-[11rem] print:hidden"
           content={stripOf(storm, stationIndex)}
           cursorAt={cursorAt}
           isFollowingNow={isFollowing}

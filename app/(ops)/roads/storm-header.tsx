@@ -1,8 +1,10 @@
 'use client';
 
+import { stormTitle } from '@/components/storm/storm-words';
 import { PageHeader } from '@/components/ui/page-header';
 import { formatDayTime } from '@/lib/time/format';
 import { type StormStateView } from '@/lib/contracts/storm-state';
+import { PassAction } from './pass-action';
 import { type RoadsScreenProps } from './roads-screen';
 
 type StormHeaderProps = Pick<RoadsScreenProps, 'storm' | 'may' | 'zone'> &
@@ -19,15 +21,14 @@ function factsOf(state: StormStateView | null, roadCount: number): string[] {
 }
 
 /** What storm, what time, what is going on, and the one thing to do next. */
-export function StormHeader({ storm, state, zone, nowAt, roadCount }: StormHeaderProps) {
-  const title = storm
-    ? `Storm ${String(storm.number).padStart(2, '0')} – ${storm.name.charAt(0).toLowerCase()}${storm.name.slice(1)}`
-    : 'Roads';
+export function StormHeader({ storm, state, may, zone, nowAt, roadCount }: StormHeaderProps) {
+  const title = storm ? stormTitle(storm) : 'Roads';
   return (
     <PageHeader
       look="bar"
       title={title}
       facts={factsOf(state, roadCount)}
+      actions={state ? <PassAction state={state} may={may} nowAt={nowAt} /> : null}
       clock={nowAt > 0 ? formatDayTime(nowAt, zone) : undefined}
     />
   );
