@@ -119,8 +119,27 @@ interface Found {
   inputs: PassInputs;
 }
 
+function choiceOf(
+  segment: PlannedSegment,
+  on: Pick<ChoiceInput, 'film' | 'weather' | 'untilMin'>,
+  { carried, inputs }: { carried: Carried; inputs: PassInputs },
+): ChoiceInput {
+  const { policy, materials } = inputs;
+  return {
+    ...on,
+    promise: policy.promises[segment.serviceClass],
+    policy,
+    materials,
+    parameters: filmParametersFor(segment.surface),
+    vehiclesPerH: policy.vehiclesPerH[segment.serviceClass],
+    windMPerS: carried.windMPerS,
+    isSensitive: segment.isSensitive,
+    spreaderMaxGPerM2: segment.spreaderMaxGPerM2,
+  };
+}
+
 function planRoad(segment: PlannedSegment, projection: SegmentProjection, inputs: PassInputs): PlannedRoad {
-  const { axis, passAt, nextPassAt, policy, materials } = inputs;
+  const { axis, passAt, nextPassAt, policy } = inputs;
   const passIndex = indexAt(axis, passAt);
   const untilMin = (indexAt(axis, nextPassAt) - passIndex) * axis.stepMin;
   const film = projection.filmAt;
@@ -131,19 +150,7 @@ function planRoad(segment: PlannedSegment, projection: SegmentProjection, inputs
   const weather = weatherFrom({ stepMin: axis.stepMin, ...carried }, passIndex);
   const knownSteps = projection.knownUntil - passIndex;
   const known = { ...weather, tempsC: Array.from(weather.tempsC).slice(0, knownSteps) };
-  const treatment = chooseTreatment({
-    film,
-    weather: known,
-    untilMin,
-    promise: policy.promises[segment.serviceClass],
-    policy,
-    materials,
-    parameters: filmParametersFor(segment.surface),
-    vehiclesPerH: policy.vehiclesPerH[segment.serviceClass],
-    windMPerS: carried.windMPerS,
-    isSensitive: segment.isSensitive,
-    spreaderMaxGPerM2: segment.spreaderMaxGPerM2,
-  });
+  const treatment = chooseTreatment(choiceOf(segment, { film, weather: known, untilMin }, { carried, inputs }));
   const { options, cautions, coldestC, ...rest } = treatment;
   return {
     segmentId: segment.id,

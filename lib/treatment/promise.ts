@@ -36,9 +36,10 @@ export type Cover = Pick<Film, 'fellMm' | 'fellAsSnowMm' | 'sinceSnowMin'>;
 
 /**
  * The part of a cover, 0 to 1, that is judged as a thin film in which no ice is allowed; the rest is snow or slush to be
- * kept loose. Rain, frost and a wet road are thin film; of what falls on snow, only the first 0.3 mm and what is more than
- * twice the snow, since the rest makes slush. Snow is kept loose while it falls, for a cycle after, and while over 0.3 mm of it lie unploughed; then what a plough left is a thin film too.
- * 0.3 mm of ploughed snow with 0.2 mm of drizzle on it: 0.4.
+ * kept loose. Rain, frost and a wet road are thin film; of what falls on snow only the first 0.3 mm and what is more
+ * than twice the snow, since the rest makes slush. Snow is kept loose while it falls, for a cycle after, and while over
+ * 0.3 mm of it lie unploughed; then what a plough left is a thin film too. 0.3 mm of ploughed snow with 0.2 mm of
+ * drizzle on it: 0.4.
  */
 export function thinFilmPart({ fellMm, fellAsSnowMm, sinceSnowMin }: Cover): number {
   if (fellMm <= 0) return 1;
