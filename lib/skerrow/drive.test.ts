@@ -39,12 +39,12 @@ const spreadKg = ({ run, roads }: ReturnType<typeof drive>, key?: string) =>
     }, 0);
 
 describe('a driven route', () => {
-  it('does every road in order and is home within the three hours between passes', () => {
+  it('does every road in order and is home before the trucks leave again', () => {
     for (const { number } of trucks) {
       const { run, roads } = drive(number);
       expect(run.entries.map(({ segmentKey }) => segmentKey)).toEqual(roads.map(({ key }) => key));
       expect(run.finishedAt).not.toBeNull();
-      expect(run.finishedAt?.getTime() ?? Infinity).toBeLessThan(later(2.75).getTime());
+      expect(run.finishedAt?.getTime() ?? Infinity).toBeLessThan(later(2.85).getTime());
       const times = run.entries.map(({ spreadAt }) => spreadAt.getTime());
       expect(times.every((time, index) => index === 0 || time > (times[index - 1] ?? 0))).toBe(true);
     }
@@ -76,7 +76,7 @@ describe('a driven route', () => {
 
   it('stands at the loader with trucks 3 and 7 in the present pass, with roads still to do', () => {
     for (const truckNumber of [3, 7]) {
-      const { run, roads } = drive(truckNumber, { storm: 7, pass: 3, hours: 1.9 });
+      const { run, roads } = drive(truckNumber, { storm: 7, pass: 3, hours: 2.9 });
       expect(run.finishedAt).toBeNull();
       expect(run.entries.length).toBeLessThan(roads.length);
       const lastLoadAt = run.loads.at(-1)?.loadedAt.getTime() ?? 0;

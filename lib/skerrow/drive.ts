@@ -63,7 +63,7 @@ export function uuidFrom(random: Random): string {
 
 /** Minutes to do a road: a wide two-lane road takes a second go on some of its length. */
 const workMin = (road: RoadSegment) =>
-  ((road.lengthM / 1000) * (road.lanes > 1 ? 1.3 : 1) * 60) / (road.speedKmPerH < 55 ? 26 : 38);
+  ((road.lengthM / 1000) * (road.lanes > 1 ? 1.3 : 1) * 60) / (road.speedKmPerH < 55 ? 23 : 34);
 
 const ends = (road: RoadSegment): [PlanePoint, PlanePoint] => {
   const first = road.line[0] ?? { xM: 0, yM: 0 };
@@ -178,10 +178,13 @@ export function driveRoute(drive: Drive, random: Random): DrivenRun {
   return drive.departure.isLoadingNow ? atTheLoader(known, drive, random) : known;
 }
 
-/** The same run, had it turned back a quarter of an hour before now to load for the roads that are left. */
+const leftForSecondLoad = 7;
+
+/** The same run, had it turned back before now to load for the roads that are left: seven or more. */
 function atTheLoader(run: DrivenRun, drive: Drive, random: Random): DrivenRun {
   const turnedMs = drive.untilAt.getTime() - 15 * minMs;
-  const entries = run.entries.filter(({ spreadAt }) => spreadAt.getTime() <= turnedMs);
+  const before = run.entries.filter(({ spreadAt }) => spreadAt.getTime() <= turnedMs);
+  const entries = before.slice(0, drive.roads.length - leftForSecondLoad);
   const done = new Set(entries.map(({ segmentKey }) => segmentKey));
   const left = drive.roads.filter(({ key }) => !done.has(key));
   const neededKg = left.reduce((sum, road) => sum + massKg(road, drive.asks.get(road.key), 1), 0);

@@ -19,7 +19,7 @@ export const storms: readonly SkerrowStorm[] = [
     fromH: -152,
     untilH: -137,
     closedH: -135.5,
-    passesH: [-151, -148.2, -145.4, -142.4, -139.7],
+    passesH: [-151.6, -148.7, -145.8, -142.5, -139.6],
     publishedPasses: 5,
   },
   {
@@ -29,7 +29,7 @@ export const storms: readonly SkerrowStorm[] = [
     fromH: -8.5,
     untilH: 10,
     closedH: null,
-    passesH: [-7.6, -4.75, -1.9, 1.5, 4.5],
+    passesH: [-8.5, -5.75, -2.9, 0.4, 3.7],
     publishedPasses: 3,
   },
 ];
@@ -52,7 +52,10 @@ export interface Departure {
 }
 
 export const departures: readonly Departure[] = [
+  { stormNumber: 7, pass: 3, truckNumber: 2, lateMin: 52 },
   { stormNumber: 7, pass: 3, truckNumber: 3, isLoadingNow: true },
+  { stormNumber: 7, pass: 3, truckNumber: 4, lateMin: 42 },
+  { stormNumber: 7, pass: 3, truckNumber: 5, lateMin: 30 },
   { stormNumber: 7, pass: 3, truckNumber: 7, isLoadingNow: true },
   { stormNumber: 6, pass: 'every', truckNumber: 4, rateFactor: 1.22 },
   { stormNumber: 6, pass: 3, truckNumber: 3, lateMin: 38 },
