@@ -20,6 +20,7 @@ const road = (position: number, over: Partial<RunRoad> = {}): RunRoad => ({
   rateMlPerM2: null,
   reason: null,
   pavementTempC: -5.9,
+  isPloughed: false,
   entryId: null,
   outcome: null,
   loggedRateGPerM2: null,

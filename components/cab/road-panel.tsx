@@ -42,7 +42,10 @@ function Asked({ road }: RoadPanelProps) {
     return (
       <div className="flex flex-wrap items-end gap-x-6 gap-y-1 pt-4 pb-3 text-lamp">
         <RateFigure rateGPerM2={road.rateGPerM2 ?? 0} rateMlPerM2={road.rateMlPerM2} size="cab" />
-        <p className="pb-1 text-2xl text-soft">{road.materialName}</p>
+        <p className="pb-1 text-2xl text-soft">
+          {road.materialName}
+          {road.isPloughed ? <strong className="block text-ink">Plough down</strong> : null}
+        </p>
       </div>
     );
   }

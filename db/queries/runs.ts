@@ -103,8 +103,8 @@ export interface RunRoadRecord {
   materialName: string | null;
   rateGPerM2: number | null;
   rateMlPerM2: number | null;
-  reason: string | null;
-  pavementTempC: number | null;
+  /** as stored with the plan: a contract of plans reads it */
+  why: unknown;
   entryId: string | null;
   outcome: 'spread' | 'ploughed' | 'skipped' | null;
   loggedRateGPerM2: number | null;
@@ -121,8 +121,7 @@ export async function listRunRoads({ id }: { id: string }): Promise<RunRoadRecor
     `select rs.position, g.id as "segmentId", g.name, g.service_class as "serviceClass", g.lanes,
             g.length_m as "lengthM", g.length_m * g.width_m as "areaM2", g.exposure, g.is_bridge as "isBridge",
             g.is_sensitive as "isSensitive", pt.action, pt.material_id as "materialId", pm.name as "materialName",
-            pt.rate_g_per_m2 as "rateGPerM2", pt.rate_ml_per_m2 as "rateMlPerM2", pt.reason,
-            (pt.why->>'pavementTempC')::float8 as "pavementTempC", e.id as "entryId",
+            pt.rate_g_per_m2 as "rateGPerM2", pt.rate_ml_per_m2 as "rateMlPerM2", pt.why, e.id as "entryId",
             e.outcome, e.rate_g_per_m2 as "loggedRateGPerM2", em.name as "loggedMaterialName", e.spread_at as "spreadAt"
        from run_segments rs
        join runs r on r.id = rs.run_id

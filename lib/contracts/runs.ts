@@ -108,6 +108,8 @@ export const RunRoad = z.object({
   rateMlPerM2: z.number().nullable(),
   reason: z.string().nullable(),
   pavementTempC: z.number().nullable(),
+  /** the plan counts on the plough going first */
+  isPloughed: z.boolean(),
   /** the entry last logged, for correcting it */
   entryId: z.string().nullable(),
   /** what was logged; null while the road is still to do */

@@ -16,6 +16,7 @@ interface RoadDone {
   outcome: 'spread' | 'ploughed' | 'skipped';
   materialId?: number | null;
   rateGPerM2?: number | null;
+  isPloughed?: boolean;
   rateSource?: 'as-shown' | 'typed';
   note?: string;
   amendsId?: string | null;

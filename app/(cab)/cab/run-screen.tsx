@@ -67,8 +67,14 @@ export function RunScreen({ runId, entries, materials, yards, header, notices, k
   };
   const asShown = (road: RunRoad) => {
     const asked = askedOf(road);
-    if (asked === 'spread') log(road, { outcome: 'spread', materialId: road.materialId, rateGPerM2: road.rateGPerM2 });
-    else if (asked === 'ploughed') log(road, { outcome: 'ploughed' });
+    if (asked === 'spread')
+      log(road, {
+        outcome: 'spread',
+        materialId: road.materialId,
+        rateGPerM2: road.rateGPerM2,
+        isPloughed: road.isPloughed,
+      });
+    else if (asked === 'ploughed') log(road, { outcome: 'ploughed', isPloughed: true });
     else log(road, { outcome: 'skipped', note: 'Nothing asked for by the plan' });
   };
   const subtitle = [
@@ -119,6 +125,7 @@ export function RunScreen({ runId, entries, materials, yards, header, notices, k
               materialId,
               rateGPerM2,
               rateSource: 'typed',
+              isPloughed: sheet.road.isPloughed,
               amendsId: sheet.isCorrection ? sheet.road.entryId : null,
             })
           }

@@ -5,5 +5,5 @@ import { readRun } from '@/lib/server/run-view';
 
 export const GET = handle(
   { action: 'run.view', params: RunParams, reply: RunView, subject: ({ params }) => runSubject(params.id) },
-  ({ params }) => readRun(params.id),
+  ({ params, actor }) => readRun(params.id, actor?.unitSystem ?? 'metric'),
 );
