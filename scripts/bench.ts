@@ -2,7 +2,7 @@
  * `npm run bench [rates|brine|map|ingest …]`: every figure is a ratio or a rate taken in one run, on one core, since
  * machines differ and are noisy. `ingest` makes databases of its own on the server of DATABASE_URL, or on the private one.
  */
-type Bench = () => unknown;
+export type Bench = () => unknown;
 
 const benches: Readonly<Record<string, () => Promise<Bench>>> = {
   rates: async () => (await import('./bench/rates')).benchRates,
