@@ -9,6 +9,12 @@ const problems = {
     kept: 'Nothing was changed.',
     todo: 'Sign in and try again.',
   },
+  'key-unknown': {
+    status: 401,
+    happened: 'This station key is not known, or it was revoked.',
+    kept: 'Nothing was changed.',
+    todo: 'Ask for a new key in Set-up, Stations.',
+  },
   'not-allowed': {
     status: 403,
     happened: '{reason}',

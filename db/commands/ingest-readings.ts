@@ -18,7 +18,9 @@ export interface IngestReadings {
   mapping: Mapping;
   from: { source: 'screen'; personId: number | null } | { source: 'script'; stationKeyId: number };
   now: Date;
-  onProgress?: (progress: { kind: 'reading' | 'storing'; rows: number; bytes: number }) => void;
+  onProgress?: ((progress: { kind: 'reading' | 'storing'; rows: number; bytes: number }) => void) | undefined;
+  /** aborted by a sender who has gone or thought better of it: nothing stays */
+  signal?: AbortSignal;
 }
 
 export interface IngestedReadings {
@@ -73,14 +75,25 @@ export async function ingestReadings(given: IngestReadings): Promise<IngestedRea
     if (same) {
       return { uploadId: same.id, alreadyReadAt: same.finishedAt, rowsRead: tally.rowsRead, ...nothingCounted };
     }
-    return store(tx, { given, sha256, tally });
+    const stored = await store(tx, { given, sha256, tally });
+    refuseStopped(given.signal);
+    return stored;
   });
 }
 
-async function copyIncoming(tx: Tx, reader: UploadReader, { body, onProgress }: IngestReadings): Promise<void> {
+function refuseStopped(signal: AbortSignal | undefined): void {
+  if (!signal?.aborted) return;
+  throw new Problem('unreadable-file', {
+    reason: 'The upload was stopped.',
+    todo: 'Send the file again when you want it read.',
+  });
+}
+
+async function copyIncoming(tx: Tx, reader: UploadReader, { body, onProgress, signal }: IngestReadings): Promise<void> {
   const sink = openCopy(tx, 'copy incoming from stdin (format binary)');
   try {
     for await (const piece of body) {
+      refuseStopped(signal);
       const rows = reader.push(piece);
       if (rows) await sink.write(rows);
       onProgress?.({ kind: 'reading', rows: reader.tally.rowsRead, bytes: reader.tally.bytes });
