@@ -15,6 +15,8 @@ export interface RunSetting {
   pass: number;
   planId: number;
   leavesAt: Date;
+  /** when each truck was back from its last run, by number; written on */
+  backAt: Map<number, Date>;
   anchorAt: Date;
   /** by segment key */
   asks: ReadonlyMap<string, Ask>;
@@ -23,6 +25,9 @@ export interface RunSetting {
   ids: Record<'people' | 'trucks' | 'yards' | 'materials' | 'segments', Ids>;
 }
 
+/** Between coming back and leaving again at the soonest. */
+const turnRoundMs = 4 * 60_000;
+
 interface Taken {
   run: DrivenRun;
   route: SeededRoute;
@@ -30,29 +35,31 @@ interface Taken {
   truckId: number;
 }
 
-function drivePass(setting: RunSetting, random: Random): Taken[] {
-  return setting.routes.flatMap((route) => {
-    const truck = trucks.find(({ number }) => number === route.truckNumber);
-    if (!truck) return [];
-    const departure = departuresOf(setting.storm.number, setting.pass, truck.number);
-    const roads = route.segmentKeys.flatMap((key) => setting.roads.get(key) ?? []);
-    const drive = {
-      roads,
+function driveOne(setting: RunSetting, route: SeededRoute, random: Random): Taken[] {
+  const truck = trucks.find(({ number }) => number === route.truckNumber);
+  if (!truck) return [];
+  const departure = departuresOf(setting.storm.number, setting.pass, truck.number);
+  const soonestMs = (setting.backAt.get(truck.number)?.getTime() ?? 0) + turnRoundMs;
+  const run = driveRoute(
+    {
+      roads: route.segmentKeys.flatMap((key) => setting.roads.get(key) ?? []),
       asks: setting.asks,
       truck,
       departure,
-      leavesAt: setting.leavesAt,
+      leavesAt: new Date(Math.max(setting.leavesAt.getTime(), soonestMs)),
       untilAt: setting.anchorAt,
-    };
-    return [
-      {
-        run: driveRoute(drive, random),
-        route,
-        driverId: idOf(setting.ids.people, departure.reliefDriver ?? truck.driver),
-        truckId: idOf(setting.ids.trucks, String(truck.number)),
-      },
-    ];
-  });
+    },
+    random,
+  );
+  if (run.finishedAt) setting.backAt.set(truck.number, run.finishedAt);
+  return [
+    {
+      run,
+      route,
+      driverId: idOf(setting.ids.people, departure.reliefDriver ?? truck.driver),
+      truckId: idOf(setting.ids.trucks, String(truck.number)),
+    },
+  ];
 }
 
 function entryRows({ run, driverId }: Taken, { asks, roads, planId, ids }: RunSetting) {
@@ -107,7 +114,9 @@ function auditRows({ run, driverId, truckId }: Taken, { stormId }: RunSetting) {
 
 /** Every truck's run of one pass as far as it has come, with its roads, entries, loads and audit rows. */
 export async function seedRunsOfPass(tx: Tx, setting: RunSetting, random: Random): Promise<void> {
-  const taken = drivePass(setting, random).filter(({ run }) => run.startedAt <= setting.anchorAt);
+  const taken = setting.routes
+    .flatMap((route) => driveOne(setting, route, random))
+    .filter(({ run }) => run.startedAt <= setting.anchorAt);
   await insertRows(tx, {
     table: 'runs',
     rows: taken.map(({ run, route, driverId, truckId }) => ({

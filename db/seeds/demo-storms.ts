@@ -74,13 +74,14 @@ export async function seedStorm(tx: Tx, setting: StormSetting, random: Random): 
   const dispatcherId = idOf(ids.people, 'Una Kinnaird');
   const stormId = await openStorm(tx, setting, dispatcherId);
   const roads = new Map(network.segments.map((segment) => [segment.key, segment]));
+  const backAt = new Map<number, Date>();
   for (const [index, hours] of storm.passesH.slice(0, storm.publishedPasses).entries()) {
     const pass = index + 1;
     const leavesAt = at(anchorAt, hours);
     const before = (minutes: number) => new Date(leavesAt.getTime() - minutes * minMs);
     const times = { workedOutAt: before(workedOutBeforeMin), publishedAt: before(publishedBeforeMin) };
     const { planId, asks } = await seedPublished(tx, { stormId, pass, dispatcherId, ...times });
-    const run = { storm, stormId, pass, leavesAt, anchorAt, routes, roads, ids };
+    const run = { storm, stormId, pass, leavesAt, backAt, anchorAt, routes, roads, ids };
     await seedRunsOfPass(tx, { ...run, planId, asks }, random);
   }
   if (storm.closedH !== null) {
