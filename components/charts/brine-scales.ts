@@ -93,12 +93,14 @@ export function brineLabels(
   });
   const pavementX = right - widthOf(words.pavement);
   const labels = [
-    label('pavement', words.pavement, [
-      [pavementX, lineY - 17],
-      [pavementX, lineY + 3],
-      [frame.left + 4, lineY - 17],
-      [frame.left + 4, lineY + 3],
-    ]),
+    label(
+      'pavement',
+      words.pavement,
+      [-17, 3, 8, 18, -31, 30, -46].flatMap((shift) => [
+        [pavementX, lineY + shift] as const,
+        [frame.left + 4, lineY + shift] as const,
+      ]),
+    ),
   ];
   if (words.refreezes !== null && crossing !== null) {
     const x = scales.x(crossing);

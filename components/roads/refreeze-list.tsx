@@ -38,16 +38,16 @@ export function RefreezeList({
       : roads.find((road) => road.id === selectedId);
   return (
     <section aria-label="Refreezes first" className={classNames('@container flex min-h-0 flex-col', className)}>
-      <header className="flex items-baseline gap-1.5 border-b px-4 py-2 @sm:gap-2">
+      <header className="flex items-baseline gap-1.5 border-b px-4 py-2 @[26rem]:gap-2">
         <h2 className="flex-1 font-bold whitespace-nowrap">Refreezes first</h2>
         {heads.map((word) => (
           <span
             key={word}
             aria-hidden
-            className="w-[3.1rem] text-right text-sm whitespace-nowrap text-soft @sm:w-[3.75rem]"
+            className="w-[3.1rem] text-right text-sm whitespace-nowrap text-soft @[26rem]:w-[3.75rem]"
           >
             {word}
-            {word === 'next' ? <span className="hidden @sm:inline"> pass</span> : null}
+            {word === 'next' ? <span className="hidden @[26rem]:inline"> pass</span> : null}
           </span>
         ))}
       </header>

@@ -16,7 +16,7 @@ export type RefreezeRowProps = Readonly<{
 }>;
 
 const barSpanMin = 180;
-const figureLook = 'w-[3.1rem] shrink-0 text-right font-mono whitespace-nowrap @sm:w-[3.75rem]';
+const figureLook = 'w-[3.1rem] shrink-0 text-right font-mono whitespace-nowrap @[26rem]:w-[3.75rem]';
 
 /** One road: name, hold, next pass and slack; under them the bar and what else tells roads apart. */
 export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: RefreezeRowProps) {
@@ -34,7 +34,7 @@ export function RefreezeRow({ road, isChosen, longestMin, onSelect, onPoint }: R
           isChosen && 'border-l-lamp bg-raised',
         )}
       >
-        <span className="flex items-baseline gap-1.5 @sm:gap-2">
+        <span className="flex items-baseline gap-1.5 @[26rem]:gap-2">
           <span className="min-w-0 flex-1 truncate font-semibold">{road.name}</span>
           <span
             className={classNames(

@@ -119,7 +119,7 @@ function stepsOf(why: PlanWhy, { system, zone, rateGPerM2, materialName }: WhyCo
 
 function optionsOf(
   options: readonly PlanOption[],
-  { materials, materialName, system }: WhyContext,
+  { materials, materialName, rateGPerM2, system }: WhyContext,
 ): WhyContent['options'] {
   return options.map((option) => {
     const name = materials.find((material) => material.id === option.materialId)?.name ?? 'Unknown material';
@@ -130,12 +130,16 @@ function optionsOf(
       { reason, ...(neededRateGPerM2 === null ? {} : { neededRateGPerM2 }), ...(limit === null ? {} : { limit }) },
       { system },
     );
-    return { materialName: name, rateGPerM2: null, refusal, isChosen: name === materialName };
+    const isChosen = name === materialName;
+    return { materialName: name, rateGPerM2: isChosen ? rateGPerM2 : null, refusal, isChosen };
   });
 }
 
-function limitsOf(why: PlanWhy): string[] {
+function limitsOf(why: PlanWhy, options: readonly PlanOption[]): string[] {
   const limits: string[] = [];
+  if (options.length > 0 && options.every((option) => !option.ok)) {
+    limits.push('No de-icer keeps the promise within its limits; what stopped each is named below.');
+  }
   if (why.binding?.isHeatLimited)
     limits.push('The heat that reaches the road, not the freezing curve, decides the rate.');
   if (why.shorterCycle)
@@ -152,7 +156,7 @@ export function whyInWords(source: WhySource, context: WhyContext): WhyContent |
   return {
     inputs: inputsOf(source, why, context),
     steps: stepsOf(why, context),
-    limits: limitsOf(why),
+    limits: limitsOf(why, options),
     cautions: why.cautions.map(cautionSentence),
     options: optionsOf(options, context),
   };

@@ -42,7 +42,7 @@ export function keyMove(
       return snapped(limits.untilAt, limits);
     case 'n':
     case 'N':
-      return snapped(limits.nowAt, limits);
+      return snapped(Math.floor(limits.nowAt / (limits.stepMin * MS_PER_MIN)) * limits.stepMin * MS_PER_MIN, limits);
     default:
       return null;
   }

@@ -11,7 +11,7 @@ export interface StripFrame {
 }
 
 export function frameFor(widthPx: number, heightPx: number): StripFrame {
-  return { widthPx, heightPx, left: widthPx < 560 ? 38 : 52, right: widthPx < 560 ? 10 : 20, top: 26, bottom: 22 };
+  return { widthPx, heightPx, left: widthPx < 560 ? 46 : 52, right: widthPx < 560 ? 10 : 20, top: 26, bottom: 22 };
 }
 
 export interface StripScales {

@@ -44,6 +44,12 @@ function useNowOf(storm: Storm | null): number {
   return isRunning ? clock : nowAt;
 }
 
+/** The newest step that is not ahead of now. */
+function lastStepBy({ axis }: Storm, nowAt: number): number {
+  const stepMs = axis.stepMin * 60_000;
+  return snapTo(axis, Math.floor(nowAt / stepMs) * stepMs);
+}
+
 export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNetwork }>) {
   const { network, zone, curves } = props;
   const [address, change] = useAddress(props.address);
@@ -55,7 +61,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
   });
   const storm = data ? decodeStorm(data) : null;
   const nowAt = useNowOf(storm);
-  const nowStep = storm ? snapTo(storm.axis, nowAt) : nowAt;
+  const nowStep = storm ? lastStepBy(storm, nowAt) : nowAt;
   const isFollowing = address.at === null || !storm || !covers(storm.axis, address.at);
   const cursorAt = isFollowing || address.at === null ? nowStep : address.at;
   const shown = roadsAt(network, storm, cursorAt);
