@@ -1,5 +1,6 @@
 import { redirect } from 'next/navigation';
 import { type ReactNode } from 'react';
+import { PortalRoot } from '@/components/ui/portal-root';
 import { UnitsProvider } from '@/components/ui/units';
 import { getActor } from '@/lib/server/session';
 
@@ -14,7 +15,7 @@ export default async function CabLayout({ children }: Readonly<{ children: React
         className="min-h-dvh bg-ground text-[1.1875rem] text-ink"
       >
         {children}
-      </div>
+      </PortalRoot>
     </UnitsProvider>
   );
 }

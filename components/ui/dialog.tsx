@@ -4,6 +4,7 @@ import { Dialog as Primitive } from 'radix-ui';
 import { type ReactNode } from 'react';
 import { Button } from './button';
 import { classNames } from './class-names';
+import { usePortalRoot } from './portal-root';
 
 export type DialogProps = Readonly<{
   isOpen: boolean;
@@ -19,9 +20,10 @@ const overlay = 'fixed inset-0 z-40 bg-black/55';
 
 /** Asks for something before anything else goes on. Escape and the close button leave it. */
 export function Dialog({ isOpen, onOpenChange, title, description, children, className }: DialogProps) {
+  const portalRoot = usePortalRoot();
   return (
     <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
-      <Primitive.Portal>
+      <Primitive.Portal container={portalRoot}>
         <Primitive.Overlay className={overlay} />
         <Primitive.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
@@ -59,9 +61,10 @@ const sides = {
 
 /** Work beside the page it belongs to. */
 export function Sheet({ isOpen, onOpenChange, title, description, children, className, side = 'right' }: SheetProps) {
+  const portalRoot = usePortalRoot();
   return (
     <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
-      <Primitive.Portal>
+      <Primitive.Portal container={portalRoot}>
         <Primitive.Overlay className={overlay} />
         <Primitive.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
