@@ -10,7 +10,7 @@ export default async function CabLayout({ children }: Readonly<{ children: React
   if (!actor) redirect('/sign-in');
   return (
     <UnitsProvider system={actor.unitSystem}>
-      <div
+      <PortalRoot
         data-theme={actor.theme === 'light' ? 'light' : 'dark'}
         className="min-h-dvh bg-ground text-[1.1875rem] text-ink"
       >

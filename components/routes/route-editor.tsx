@@ -142,7 +142,7 @@ function RoadOrder({ roads, ids, error, onChange }: RoadOrderProps) {
           ))}
         </ul>
       ) : null}
-      <ol className="max-h-[45vh] overflow-y-auto border-b">
+      <ol tabIndex={0} aria-label="Roads in order" className="max-h-[45vh] overflow-y-auto border-b">
         {ids.map((id, index) => {
           const name = byId.get(id)?.name ?? 'Road out of use';
           return (

@@ -6,7 +6,7 @@ import { type RoadOption } from './route-editor';
 /** The roads of a route in the order they are treated. */
 export function RouteRoads({ roads }: Readonly<{ roads: readonly RoadOption[] }>) {
   return (
-    <ol className="max-h-[60vh] overflow-y-auto">
+    <ol tabIndex={0} aria-label="Roads in order" className="max-h-[60vh] overflow-y-auto">
       {roads.map((road, index) => (
         <li key={`${index}-${road.id}`} className="flex items-baseline gap-3 border-t py-1.5">
           <span className="w-8 shrink-0 text-right font-mono text-soft">{index + 1}</span>

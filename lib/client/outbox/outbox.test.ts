@@ -70,6 +70,18 @@ describe('outbox', () => {
     expect(sent).toEqual(['1:sent']);
   });
 
+  it('sends what is added while a flush is under way', async () => {
+    const late: { add?: () => Promise<void> } = {};
+    const { outbox, sent } = outboxThat((message) => {
+      if (message.id.startsWith('00000001')) void late.add?.();
+      return { sent: true };
+    });
+    late.add = () => outbox.add(finish(2));
+    await outbox.add(finish(1));
+    await outbox.flush();
+    expect(sent).toEqual(['1:sent', '2:sent']);
+  });
+
   it('backs off from 2 s to a minute and retries only what may yet succeed', () => {
     expect([1, 2, 3, 6, 20].map(backOffMs)).toEqual([2000, 4000, 8000, 60_000, 60_000]);
     expect(

@@ -34,17 +34,18 @@ export function createOutbox({ store, send, onChange }: OutboxOptions) {
 
   const announce = async () => onChange(await store.list());
 
+  /** The list is read anew for each message, so that one added meanwhile is sent too. */
   const flushOnce = async (): Promise<boolean> => {
-    for (const entry of await store.list()) {
-      if (entry.refusal !== null) continue;
-      const result = await send(entry.message);
-      if (result.sent) await store.remove(entry.message.id);
+    for (;;) {
+      const next = (await store.list()).find((entry) => entry.refusal === null);
+      if (!next) return true;
+      const result = await send(next.message);
+      if (result.sent) await store.remove(next.message.id);
       else if (result.isRefused)
-        await store.refuse(entry.message.id, `${result.problem.title} ${result.problem.detail}`);
+        await store.refuse(next.message.id, `${result.problem.title} ${result.problem.detail}`);
       else return false;
       await announce();
     }
-    return true;
   };
 
   /** True when nothing waits any more. Calls while one is under way share it. */
