@@ -32,15 +32,16 @@ export function decodeStorm(view: StormStateView): Storm {
   };
 }
 
+const scales = {
+  marginC: perUnit.marginC,
+  pavementC: perUnit.tempC,
+  waterMm: perUnit.waterMm,
+  massFraction: perUnit.massFraction,
+} as const;
+
 /** A value of a road at a step, null where it is not known. */
-export function valueAt(storm: Storm, column: Exclude<keyof Rows, 'holdSteps'>, at: { row: number; step: number }) {
-  const scale = {
-    marginC: perUnit.marginC,
-    pavementC: perUnit.tempC,
-    waterMm: perUnit.waterMm,
-    massFraction: perUnit.massFraction,
-  };
-  return fromStep(storm.rows[column][at.row * storm.axis.count + at.step] ?? 0, scale[column]);
+export function valueAt(storm: Storm, column: keyof typeof scales, at: { row: number; step: number }): number | null {
+  return fromStep(storm.rows[column][at.row * storm.axis.count + at.step] ?? 0, scales[column]);
 }
 
 const hourMs = 3_600_000;

@@ -14,15 +14,13 @@ const msPerMin = 60_000;
 const silentMs = 2 * 3_600_000;
 const missing = '2';
 
-/** Every road at one time of a storm, in the order of the map. */
-export interface RoadsAt {
-  readonly roads: readonly RoadNow[];
+export interface BandsAt {
   /** for the map, a style a road */
   readonly styles: Uint8Array;
   readonly counts: Readonly<Record<MarginBand, number>>;
-  /** minutes from the cursor to the end of what is forecast */
-  readonly longestMin: number;
 }
+
+const codes = Object.fromEntries(marginBands.map((band) => [band, styleCode(band)])) as Record<MarginBand, number>;
 
 function holdMinAt(storm: Storm, row: number, step: number): number | null {
   const steps = storm.rows.holdSteps[row * storm.axis.count + step] ?? UNKNOWN_STEP;
@@ -77,30 +75,44 @@ function roadAt(network: RoadNetwork, index: number, seen: { storm: Storm; step:
   };
 }
 
-/** All roads at a time of a storm; without a storm nothing is known of any. */
-export function roadsAt(network: RoadNetwork, storm: Storm | null, at: number): RoadsAt {
-  const seen = storm ? { storm, at, step: indexAt(storm.axis, at) } : null;
-  const roads = network.segments.map((_, index) => roadAt(network, index, seen));
+/** The bands of all roads at a time, for the map: no more work than a drag of the cursor leaves time for. */
+export function bandsAt(network: RoadNetwork, storm: Storm | null, at: number): BandsAt {
+  const styles = new Uint8Array(network.segments.length);
   const counts = Object.fromEntries(marginBands.map((band) => [band, 0])) as Record<MarginBand, number>;
-  for (const road of roads) counts[road.band] += 1;
-  return {
-    roads,
-    styles: Uint8Array.from(roads, (road) => styleCode(road.band)),
-    counts,
-    longestMin: storm ? Math.max(0, (endOf(storm.axis) - at) / msPerMin) : 0,
-  };
+  const step = storm ? indexAt(storm.axis, at) : 0;
+  network.segments.forEach(({ id }, index) => {
+    const row = storm?.rowById.get(id);
+    const band = storm && row !== undefined ? bandAt(storm, row, step) : 'unknown';
+    styles[index] = codes[band];
+    counts[band] += 1;
+  });
+  return { styles, counts };
+}
+
+/** All roads at a time of a storm, in the order of the map; without a storm nothing is known of any. */
+export function roadsAt(network: RoadNetwork, storm: Storm | null, at: number): RoadNow[] {
+  const seen = storm ? { storm, at, step: indexAt(storm.axis, at) } : null;
+  return network.segments.map((_, index) => roadAt(network, index, seen));
+}
+
+/** Minutes from a time to the end of what is forecast. */
+export function longestMinAt(storm: Storm | null, at: number): number {
+  return storm ? Math.max(0, (endOf(storm.axis) - at) / msPerMin) : 0;
 }
 
 const never = Number.MAX_SAFE_INTEGER;
 
+/** A road of which nothing is known stands before those that hold: it is not to be treated as clear. */
+const holdKey = (road: RoadNow) => Math.min(never, road.holdMin ?? never - 1);
+const slackKey = (road: RoadNow) => Math.min(never, road.slackMin ?? (road.nextPassMin === null ? -never : never));
+
 /** What refreezes first stands first; of those alike the more important road, then the one with less slack. */
 export function byUrgency(a: RoadNow, b: RoadNow): number {
-  const hold = (road: RoadNow) => Math.min(never, road.holdMin ?? never);
-  const slack = (road: RoadNow) => Math.min(never, road.slackMin ?? (road.nextPassMin === null ? -never : never));
   return (
-    hold(a) - hold(b) ||
-    a.serviceClass.localeCompare(b.serviceClass) ||
-    slack(a) - slack(b) ||
+    holdKey(a) - holdKey(b) ||
+    // Classes are single letters: comparing them by their language would take most of the time of a sort.
+    a.serviceClass.charCodeAt(0) - b.serviceClass.charCodeAt(0) ||
+    slackKey(a) - slackKey(b) ||
     (a.freezeMarginC ?? never) - (b.freezeMarginC ?? never) ||
     a.index - b.index
   );

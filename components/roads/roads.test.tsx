@@ -7,7 +7,7 @@ import { decodeStorm, stripOf } from './decode-storm';
 import { bandOf, bandRange, holdInFigures } from './margin-band';
 import { nextPassAt } from './next-pass';
 import { RefreezeList } from './refreeze-list';
-import { byUrgency, roadsAt } from './roads-at';
+import { bandsAt, byUrgency, longestMinAt, roadsAt } from './roads-at';
 
 afterEach(cleanup);
 
@@ -99,35 +99,41 @@ const now = startAt + 10 * minMs;
 const roadsNow = () => roadsAt(network, decodeStorm(view), now);
 
 describe('roads at a time', () => {
-  it('put what refreezes first first, and what is not known last', () => {
+  it('put what refreezes first first, and what is not known before what is clear', () => {
     expect(
       roadsNow()
-        .roads.toSorted(byUrgency)
+        .toSorted(byUrgency)
         .map((road) => road.name),
-    ).toEqual(['Ridge', 'Bridge', 'Shore', 'Lane']);
+    ).toEqual(['Ridge', 'Bridge', 'Lane', 'Shore']);
   });
 
   it('slack is hold minus the time to the next pass', () => {
-    const [ridge, bridge, shore] = roadsNow().roads;
+    const [ridge, bridge, shore] = roadsNow();
     expect(ridge).toMatchObject({ band: 'frozen', holdMin: 0, nextPassMin: 25, slackMin: -25, truckNumber: 4 });
     expect(bridge).toMatchObject({ band: 'closing', holdMin: 20, nextPassMin: 15, slackMin: 5, pavementTempC: -6.4 });
     expect(shore).toMatchObject({ band: 'safe', holdMin: Infinity, nextPassMin: null, slackMin: null });
   });
 
   it('a road whose stations are silent is not known, and is never shown as clear', () => {
-    const lane = roadsNow().roads[3];
+    const lane = roadsNow()[3];
     expect(lane).toMatchObject({ band: 'unknown', freezeMarginC: null, holdMin: null, slackMin: null });
-    expect(roadsNow().counts).toMatchObject({ frozen: 1, closing: 1, safe: 1, unknown: 1 });
+    expect(bandsAt(network, decodeStorm(view), now).counts).toMatchObject({
+      frozen: 1,
+      closing: 1,
+      safe: 1,
+      unknown: 1,
+    });
   });
 
   it('follow the cursor', () => {
     const later = roadsAt(network, decodeStorm(view), startAt + 30 * minMs);
-    expect(later.roads[1]).toMatchObject({ band: 'frozen', holdMin: 0 });
-    expect(later.longestMin).toBe(0);
+    expect(later[1]).toMatchObject({ band: 'frozen', holdMin: 0 });
+    expect(longestMinAt(decodeStorm(view), startAt + 30 * minMs)).toBe(0);
   });
 
   it('are all unknown without a storm', () => {
-    expect(roadsAt(network, null, now).counts.unknown).toBe(4);
+    expect(bandsAt(network, null, now).counts.unknown).toBe(4);
+    expect(roadsAt(network, null, now).map((road) => road.band)).toEqual(Array(4).fill('unknown'));
   });
 });
 
@@ -194,7 +200,7 @@ describe('the strip of a station', () => {
 describe('the list', () => {
   it('says hold, next pass and slack in words as well, and tells which road was chosen', () => {
     const onSelect = vi.fn();
-    const roads = roadsNow().roads.toSorted(byUrgency);
+    const roads = roadsNow().toSorted(byUrgency);
     render(<RefreezeList roads={roads} selectedId={2} longestMin={600} onSelect={onSelect} />);
     const ridge = screen.getByRole('button', { name: /Ridge/ });
     expect(ridge.textContent).toMatch(/holds 0:00.*next pass in 0:25.*slack \u22120:25.*icing, class A, \u22127\.1/);
@@ -204,7 +210,7 @@ describe('the list', () => {
   });
 
   it('begins with forty roads, with the chosen one wherever it stands, and shows all when asked', () => {
-    const first = roadsNow().roads[0];
+    const first = roadsNow()[0];
     if (!first) throw new Error('no road');
     const many = Array.from({ length: 60 }, (_, index) => ({ ...first, id: index, name: `Road ${index}` }));
     render(<RefreezeList roads={many} selectedId={55} longestMin={600} onSelect={vi.fn()} />);

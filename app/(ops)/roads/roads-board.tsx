@@ -1,14 +1,14 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useDeferredValue, useState } from 'react';
 import { RoadMap } from '@/components/map';
 import { type RoadNetwork } from '@/components/roads/decode-roads';
 import { decodeStorm, stripOf, type Storm } from '@/components/roads/decode-storm';
 import { bandWords } from '@/components/roads/margin-band';
 import { MarginLegend } from '@/components/roads/margin-legend';
 import { RefreezeList } from '@/components/roads/refreeze-list';
-import { byUrgency, roadsAt } from '@/components/roads/roads-at';
+import { bandsAt, byUrgency, longestMinAt, roadsAt } from '@/components/roads/roads-at';
 import { StormStrip } from '@/components/storm-strip/storm-strip';
 import { classNames } from '@/components/ui/class-names';
 import { Segmented } from '@/components/ui/segmented';
@@ -64,15 +64,19 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
   const nowStep = storm ? lastStepBy(storm, nowAt) : nowAt;
   const isFollowing = address.at === null || !storm || !covers(storm.axis, address.at);
   const cursorAt = isFollowing || address.at === null ? nowStep : address.at;
-  const shown = roadsAt(network, storm, cursorAt);
-  const sorted = shown.roads.toSorted(byUrgency);
+  const bands = bandsAt(network, storm, cursorAt);
+  // While the cursor is dragged the map comes first; the list follows as soon as there is time.
+  const listAt = useDeferredValue(cursorAt);
+  const roads = roadsAt(network, storm, listAt);
+  const sorted = roads.toSorted(byUrgency);
+  const longestMin = longestMinAt(storm, listAt);
   const chosen = sorted.find((road) => road.id === address.segmentId) ?? (storm ? sorted[0] : undefined);
   const row = storm && chosen ? storm.rowById.get(chosen.id) : undefined;
   const stationIndex = storm && row !== undefined ? (storm.view.stationOf[row] ?? 0) : 0;
   const time = formatTime(cursorAt, zone);
   const choose = (segmentId: number) => change({ segmentId });
   const describe = (index: number) => {
-    const road = shown.roads[index];
+    const road = roads[index];
     return road ? `${road.name}, ${bandWords[road.band]}` : '';
   };
   const onPhone = (own: View) => (view === own ? '' : 'max-md:hidden');
@@ -93,7 +97,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
         <div className={classNames('relative min-h-0 md:max-lg:col-span-2 lg:row-span-2', onPhone('map'))}>
           <RoadMap
             segments={network.segments}
-            styles={shown.styles}
+            styles={bands.styles}
             baseFeatures={network.baseFeatures}
             selectedId={chosen?.id ?? null}
             highlightIds={pointedId === null ? [] : [pointedId]}
@@ -101,12 +105,12 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
             describe={describe}
             trucks={storm ? trucksOf(storm, zone) : []}
             fitKey={network.version}
-            legend={storm ? <MarginLegend time={time} counts={shown.counts} /> : null}
+            legend={storm ? <MarginLegend time={time} counts={bands.counts} /> : null}
             attribution={network.attribution}
             label={`Roads by freeze margin at ${time}`}
           />
           {chosen && storm ? (
-            <PointedRoad road={chosen} longestMin={shown.longestMin} onOpen={() => setView('road')} />
+            <PointedRoad road={chosen} longestMin={longestMin} onOpen={() => setView('road')} />
           ) : null}
         </div>
         {storm && chosen ? (
@@ -115,7 +119,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
               className={classNames('bg-panel md:border-l', onPhone('list'))}
               roads={sorted}
               selectedId={chosen.id}
-              longestMin={shown.longestMin}
+              longestMin={longestMin}
               onSelect={(id) => {
                 choose(id);
                 setView('road');
@@ -157,7 +161,7 @@ export function RoadsBoard(props: RoadsScreenProps & Readonly<{ network: RoadNet
           stepMin={storm.axis.stepMin}
         />
       ) : null}
-      {storm ? <SpokenState shown={shown} first={sorted[0]} time={time} /> : null}
+      {storm ? <SpokenState counts={bands.counts} first={sorted[0]} time={time} /> : null}
     </div>
   );
 }
