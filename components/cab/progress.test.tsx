@@ -80,6 +80,21 @@ describe('a run in the cab', () => {
     expect(neededKg(shown)).toBeCloseTo(280, 9);
   });
 
+  it('lets go of its own picture once the server has the entry, and corrects the sum by a correction', () => {
+    const logged = { entryId: 'e', outcome: 'spread', loggedRateGPerM2: 30, spreadAt: '2026-12-01T02:20:00Z' } as const;
+    const server = {
+      ...run,
+      spreadKg: 310,
+      roads: [road(1, { outcome: 'spread' }), road(2, logged), road(3), road(4)],
+    };
+    const own = { segmentId: 20, materialName: null, outcome: 'spread' } as const;
+    const same = withPending(server, [{ ...own, entryId: 'e', rateGPerM2: 30, spreadAt: '2026-12-01T02:20:00Z' }]);
+    expect(same.spreadKg).toBe(310);
+    const corrected = withPending(server, [{ ...own, entryId: 'f', rateGPerM2: 20, spreadAt: '2026-12-01T02:25:00Z' }]);
+    expect(corrected.spreadKg).toBeCloseTo(240, 9);
+    expect(corrected.roads[1]?.loggedRateGPerM2).toBe(20);
+  });
+
   it('says what is asked of a road', () => {
     expect(askedOf(road(1))).toBe('spread');
     expect(askedOf(road(1, { action: 'plough', rateGPerM2: null }))).toBe('ploughed');

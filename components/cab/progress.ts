@@ -10,30 +10,37 @@ export interface PendingRoad {
   spreadAt: string;
 }
 
-/** The run as the driver sees it: the server's, with what still waits on this tablet laid over it. */
+/**
+ * The run as the driver sees it: the server's, with what was logged on this tablet laid over it until the server's own
+ * picture holds it. Without that a road just sent would come back as not done for a moment, and be logged twice.
+ */
 export function withPending(run: RunView, pending: readonly PendingRoad[]): RunView {
-  const waiting = new Map(pending.map((road) => [road.segmentId, road]));
+  const mine = new Map(pending.map((road) => [road.segmentId, road]));
+  let spreadKg = run.spreadKg;
   const roads = run.roads.map((road): RunRoad => {
-    const mine = waiting.get(road.segmentId);
-    return mine
-      ? {
-          ...road,
-          entryId: mine.entryId,
-          outcome: mine.outcome,
-          loggedRateGPerM2: mine.rateGPerM2,
-          loggedMaterialName: mine.materialName,
-          spreadAt: mine.spreadAt,
-        }
-      : road;
+    const own = mine.get(road.segmentId);
+    if (!own || isKnown(road, own)) return road;
+    spreadKg += loggedKg(own.outcome, own.rateGPerM2, road) - loggedKg(road.outcome, road.loggedRateGPerM2, road);
+    return {
+      ...road,
+      entryId: own.entryId,
+      outcome: own.outcome,
+      loggedRateGPerM2: own.rateGPerM2,
+      loggedMaterialName: own.materialName,
+      spreadAt: own.spreadAt,
+    };
   });
-  return { ...run, roads, spreadKg: run.spreadKg + pendingKg(run, waiting) };
+  return { ...run, roads, spreadKg };
 }
 
-function pendingKg(run: RunView, waiting: ReadonlyMap<number, PendingRoad>): number {
-  return run.roads.reduce((sum, road) => {
-    const mine = waiting.get(road.segmentId);
-    return mine?.outcome === 'spread' ? sum + ((mine.rateGPerM2 ?? 0) * road.areaM2) / 1000 : sum;
-  }, 0);
+/** Whether the server's picture of a road is as new as the tablet's. */
+function isKnown(road: RunRoad, own: PendingRoad): boolean {
+  if (road.entryId === own.entryId) return true;
+  return road.spreadAt !== null && new Date(road.spreadAt).getTime() > new Date(own.spreadAt).getTime();
+}
+
+function loggedKg(outcome: RunRoad['outcome'], rateGPerM2: number | null, road: RunRoad): number {
+  return outcome === 'spread' ? ((rateGPerM2 ?? 0) * road.areaM2) / 1000 : 0;
 }
 
 /** The first road not yet logged, or the one the driver chose; null when all are. */

@@ -32,7 +32,7 @@ export type CabScreenProps = Readonly<{
 export function CabScreen({ driver, zone, openRunId, trucks, routes, roads, materials, yards }: CabScreenProps) {
   const queryClient = useQueryClient();
   const refresh = useCallback(() => void queryClient.invalidateQueries({ queryKey: ['run'] }), [queryClient]);
-  const { entries, keep } = useOutbox(refresh);
+  const { entries, sent, keep } = useOutbox(refresh);
   const [runId, setRunId] = useState(openRunId);
   const [isStarting, setIsStarting] = useState(false);
   const isOnline = useIsOnline();
@@ -77,7 +77,7 @@ export function CabScreen({ driver, zone, openRunId, trucks, routes, roads, mate
     <RunScreen
       key={runId}
       runId={runId}
-      entries={entries}
+      kept={{ entries, sent }}
       materials={materials}
       yards={yards}
       header={header}

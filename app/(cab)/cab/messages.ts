@@ -27,18 +27,19 @@ export function roadDone(done: RoadDone): KeptMessage {
   return messageOf('spread-entry', id, { ...done, id, spreadAt: new Date().toISOString() });
 }
 
-/** The roads of a run that wait in the outbox, as the screen draws them. Refused ones are not counted as done. */
-export function pendingOf(
-  entries: readonly Entry[],
+/** The roads of a run as this tablet logged them, oldest first. Refused ones are not counted as done. */
+export function loggedHere(
+  kept: { entries: readonly Entry[]; sent: readonly KeptMessage[] },
   runId: string,
   nameOf: (materialId: number) => string,
 ): PendingRoad[] {
-  return entries.flatMap(({ message, refusal }) => {
-    if (message.kind !== 'spread-entry' || message.payload.runId !== runId || refusal !== null) return [];
-    const { segmentId, outcome, rateGPerM2, materialId, spreadAt } = message.payload;
+  const waiting = kept.entries.flatMap(({ message, refusal }) => (refusal === null ? [message] : []));
+  return [...kept.sent, ...waiting].flatMap((message) => {
+    if (message.kind !== 'spread-entry' || message.payload.runId !== runId) return [];
+    const { id, segmentId, outcome, rateGPerM2, materialId, spreadAt } = message.payload;
     return [
       {
-        entryId: message.payload.id,
+        entryId: id,
         segmentId,
         outcome,
         rateGPerM2: rateGPerM2 ?? null,

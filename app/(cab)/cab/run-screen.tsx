@@ -17,11 +17,11 @@ import { newId } from '@/lib/client/new-id';
 import { type Entry, type KeptMessage } from '@/lib/client/outbox/store';
 import { runQuery } from '@/lib/client/queries/runs';
 import { type RunRoad } from '@/lib/contracts/runs';
-import { messageOf, pendingOf, roadDone } from './messages';
+import { loggedHere, messageOf, roadDone } from './messages';
 
 export type RunScreenProps = Readonly<{
   runId: string;
-  entries: readonly Entry[];
+  kept: { entries: readonly Entry[]; sent: readonly KeptMessage[] };
   materials: readonly CabMaterialChoice[];
   yards: readonly { id: number; name: string }[];
   header: (title: string, subtitle: string) => ReactNode;
@@ -33,7 +33,7 @@ export type RunScreenProps = Readonly<{
 type OpenSheet =
   { kind: 'rate'; road: RunRoad; isCorrection: boolean } | { kind: 'skip'; road: RunRoad } | { kind: 'load' };
 
-export function RunScreen({ runId, entries, materials, yards, header, notices, keep, onLeave }: RunScreenProps) {
+export function RunScreen({ runId, kept, materials, yards, header, notices, keep, onLeave }: RunScreenProps) {
   const { data, error } = useQuery(runQuery(runId));
   const [chosen, setChosen] = useState<number | null>(null);
   const [sheet, setSheet] = useState<OpenSheet | null>(null);
@@ -58,7 +58,7 @@ export function RunScreen({ runId, entries, materials, yards, header, notices, k
       </>
     );
 
-  const run = withPending(data, pendingOf(entries, runId, nameOf));
+  const run = withPending(data, loggedHere(kept, runId, nameOf));
   const now = roadNow(run, chosen);
   const log = (road: RunRoad, done: Omit<Parameters<typeof roadDone>[0], 'runId' | 'segmentId'>) => {
     setSheet(null);

@@ -38,24 +38,32 @@ async function send(message: KeptMessage): Promise<SendResult> {
 
 interface Kept {
   entries: readonly Entry[];
+  /** sent since the page opened: the server has them, its next answer will show them */
+  sent: readonly KeptMessage[];
   /** Keeps the message on the tablet, then tries to send it. */
   keep: (message: KeptMessage) => Promise<void>;
 }
 
 /** The tablet's outbox, sent at start, when the connection comes back, and again with growing pauses. */
-export function useOutbox(onSent: () => void): Kept {
+export function useOutbox(onFlushed: () => void): Kept {
   const [entries, setEntries] = useState<readonly Entry[]>([]);
+  const [sent, setSent] = useState<readonly KeptMessage[]>([]);
   const [outbox, setOutbox] = useState<Outbox | null>(null);
 
   useEffect(() => {
-    const made = createOutbox({ store: createIndexedDbStore(), send, onChange: setEntries });
+    const made = createOutbox({
+      store: createIndexedDbStore(),
+      send,
+      onChange: setEntries,
+      onSent: (message) => setSent((before) => [...before.slice(-199), message]),
+    });
     let failures = 0;
     let timer: ReturnType<typeof setTimeout> | undefined;
     const trySending = async () => {
       clearTimeout(timer);
       const isEmpty = await made.flush();
       failures = isEmpty ? 0 : failures + 1;
-      onSent();
+      onFlushed();
       if (!isEmpty) timer = setTimeout(() => void trySending(), backOffMs(failures));
     };
     const now = () => void trySending();
@@ -69,15 +77,15 @@ export function useOutbox(onSent: () => void): Kept {
       clearTimeout(timer);
       window.removeEventListener('online', now);
     };
-  }, [onSent]);
+  }, [onFlushed]);
 
   const keep = async (message: KeptMessage) => {
     if (!outbox) return;
     await outbox.add(message);
     const isEmpty = await outbox.flush();
-    onSent();
+    onFlushed();
     // The timer of the effect goes on from here; the event starts it.
     if (!isEmpty) window.dispatchEvent(new Event('online'));
   };
-  return { entries, keep };
+  return { entries, sent, keep };
 }

@@ -26,10 +26,12 @@ interface OutboxOptions {
   store: OutboxStore;
   send: (message: KeptMessage) => Promise<SendResult>;
   onChange: (entries: Entry[]) => void;
+  /** the server has it */
+  onSent?: (message: KeptMessage) => void;
 }
 
 /** Sends what waits, oldest first, one at a time; a message that cannot be sent now stops the line, a refused one does not. */
-export function createOutbox({ store, send, onChange }: OutboxOptions) {
+export function createOutbox({ store, send, onChange, onSent }: OutboxOptions) {
   let flushing: Promise<boolean> | null = null;
 
   const announce = async () => onChange(await store.list());
@@ -40,8 +42,10 @@ export function createOutbox({ store, send, onChange }: OutboxOptions) {
       const next = (await store.list()).find((entry) => entry.refusal === null);
       if (!next) return true;
       const result = await send(next.message);
-      if (result.sent) await store.remove(next.message.id);
-      else if (result.isRefused)
+      if (result.sent) {
+        await store.remove(next.message.id);
+        onSent?.(next.message);
+      } else if (result.isRefused)
         await store.refuse(next.message.id, `${result.problem.title} ${result.problem.detail}`);
       else return false;
       await announce();
