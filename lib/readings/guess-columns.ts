@@ -106,6 +106,7 @@ export function guessColumns(
 ): ColumnGuess {
   const columns: ColumnMapping[] = [];
   const doubts: Doubt[] = [];
+  const unnamed: string[] = [];
   names.forEach((name, index) => {
     const head = spaced(name);
     const quantity = heads.find(([pattern]) => pattern.test(head))?.[1];
@@ -117,9 +118,7 @@ export function guessColumns(
     }
     const named = unitByHead(name, quantity);
     const unit = named ?? unitByValues(quantity, numbersOf(index));
-    if (!named && unit !== 'word') {
-      doubts.push({ part: name, sentence: `“${name}” names no unit: ${unit} is taken from the size of its numbers.` });
-    }
+    if (!named && unit !== 'word') unnamed.push(`${unit} for “${name}”`);
     const intervalMin = unit !== 'word' && 'needsInterval' in fileUnits[unit] ? stepMin : USUAL_INTERVAL_MIN;
     columns.push({
       column: name,
@@ -131,5 +130,9 @@ export function guessColumns(
       timeIs: 'end',
     });
   });
+  if (unnamed.length > 0) {
+    const sentence = `Where the head names no unit, the size of the numbers speaks for it: ${unnamed.join(', ')}.`;
+    doubts.push({ part: 'units', sentence });
+  }
   return { columns, doubts };
 }

@@ -112,7 +112,7 @@ export function guessMapping({ bytes, isWhole, clock }: Head): Guess {
   const doubts: Doubt[] = [
     {
       part: 'clock',
-      sentence: 'The file does not say whose clock its times are told by: look at the zone, of each column too.',
+      sentence: 'The file does not say by whose clock its times are told, nor whether one column keeps another’s.',
     },
   ];
   if (!time)

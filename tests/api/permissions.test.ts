@@ -16,7 +16,7 @@ const pages: readonly [string, Action][] = [
   ['/setup', 'setup.view'],
   ['/setup/people', 'setup.people'],
   ['/setup/roads', 'setup.roads'],
-  ['/setup/stations', 'setup.stations'],
+  ['/setup/stations', 'readings.import'],
   ['/setup/materials', 'setup.materials'],
   ['/setup/fleet', 'setup.fleet'],
 ];

@@ -17,7 +17,7 @@ const parts: readonly { href: string; label: string; what: string; needs: Action
     href: '/setup/stations',
     label: 'Stations',
     what: 'Weather stations, how their files are read, and the keys they send with.',
-    needs: 'setup.stations',
+    needs: 'readings.import',
   },
   {
     href: '/setup/materials',

@@ -11,9 +11,9 @@ const MOST_AT_ONCE = 4;
 let underWay = 0;
 
 async function stationOfKey(request: Request) {
-  const key = /^Bearer\s+(\S+)$/i.exec(request.headers.get('authorization') ?? '')?.[1];
-  if (key === undefined) return null;
-  const found = await findStationByKey({ key });
+  const authorization = request.headers.get('authorization');
+  if (authorization === null) return null;
+  const found = await findStationByKey({ key: authorization.replace(/^Bearer\s+/i, '') });
   if (!found) throw new Problem('key-unknown');
   return found;
 }
