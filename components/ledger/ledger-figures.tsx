@@ -3,22 +3,15 @@
 import { Figure, FigureBlock } from '@/components/ui/figure';
 import { type LedgerView } from '@/lib/contracts/ledger';
 import { differenceFraction } from '@/lib/ledger/account';
-import { formatNumber } from '@/lib/units/format';
+import { formatMoney } from '@/lib/units/money';
 import { Difference } from './difference';
 
 export type LedgerFiguresProps = Readonly<{ ledger: LedgerView }>;
 
-/** Cents as whole money, grouped like every other figure: "€5 159". */
-export function money(cents: number, currency: string): string {
-  const parts = new Intl.NumberFormat('en-IE', { style: 'currency', currency }).formatToParts(0);
-  const sign = parts.find((part) => part.type === 'currency')?.value ?? currency;
-  return `${sign}${formatNumber(cents / 100, 0)}`;
-}
-
 /** The five figures that matter. */
 export function LedgerFigures({ ledger }: LedgerFiguresProps) {
   const { total, laneKm, currency } = ledger;
-  const perLaneKm = laneKm > 0 ? money(total.costCents / laneKm, currency) : null;
+  const perLaneKm = laneKm > 0 ? formatMoney(Math.round(total.costCents / laneKm), currency) : null;
   return (
     <dl className="flex flex-wrap gap-x-11 gap-y-5">
       <FigureBlock
@@ -38,7 +31,7 @@ export function LedgerFigures({ ledger }: LedgerFiguresProps) {
         label="Cost of material"
         beside={perLaneKm ? `${perLaneKm} per lane-km treated` : 'nothing treated yet'}
       >
-        {money(total.costCents, currency)}
+        {formatMoney(Math.round(total.costCents), currency, 0)}
       </FigureBlock>
       <FigureBlock
         label="Chloride to salt-sensitive ground"
