@@ -25,6 +25,7 @@ function content(pavementTempC: number, massFraction: number | null): BrineConte
     saltBranch: [],
     pavementTempC,
     pavementAt: at,
+    promisedMassFraction: massFraction === null ? null : 0.014,
     now: massFraction === null ? null : state(0),
     past: [state(-30)],
     future: [state(30)],
@@ -34,6 +35,7 @@ function content(pavementTempC: number, massFraction: number | null): BrineConte
 const words = {
   pavement: 'pavement −6.2 °C at 04:10',
   refreezes: 'refreezes at 9.6 %',
+  promise: 'promise kept from 1.4 %',
   brine: 'all brine',
   ice: 'ice + brine',
 };

@@ -72,6 +72,7 @@ export function BrineChart({ content, zone, heightPx = 172, caption }: BrineChar
 const labelLook: Readonly<Record<string, string>> = {
   pavement: 'fill-closing',
   refreezes: 'fill-urgent',
+  promise: 'fill-ink',
   ice: 'fill-frozen',
   brine: 'fill-soft',
 };
@@ -79,11 +80,15 @@ const labelLook: Readonly<Record<string, string>> = {
 function wordsFor(content: BrineContent, system: UnitSystem, zone: string) {
   const pavement = formatQuantity(content.pavementTempC, 'temperature', system);
   const crossing = strengthAt(content.iceBranch, content.pavementTempC);
+  const promised = content.promisedMassFraction;
   const isFrozen = content.now !== null && crossing !== null && content.now.massFraction < crossing;
   return {
     pavement: `pavement ${pavement.value} ${pavement.unit} at ${formatTime(content.pavementAt, zone)}`,
     refreezes:
-      crossing === null ? null : `${isFrozen ? 'ice below' : 'refreezes at'} ${formatNumber(crossing * 100, 1)} %`,
+      crossing === null
+        ? null
+        : `${isFrozen || promised !== null ? 'ice below' : 'refreezes at'} ${formatNumber(crossing * 100, 1)} %`,
+    promise: promised === null ? null : `promise kept from ${formatNumber(promised * 100, 1)} %`,
     ice: 'ice + brine',
     brine: 'all brine',
   };
@@ -195,6 +200,9 @@ function Road({ content, frame, scales }: Readonly<{ content: BrineContent; fram
       ))}
       {crossing === null ? null : (
         <path d={`M${scales.x(crossing)} ${y - 5}v10`} className="stroke-urgent" strokeWidth={2} />
+      )}
+      {content.promisedMassFraction === null ? null : (
+        <path d={`M${scales.x(content.promisedMassFraction)} ${y - 5}v10`} className="stroke-ink" strokeWidth={2} />
       )}
       {content.now ? (
         <circle

@@ -23,6 +23,11 @@ export interface BrineContent {
   readonly saltBranch: readonly CurvePoint[];
   readonly pavementTempC: number;
   readonly pavementAt: number;
+  /**
+   * Strength that keeps what the road was promised at that temperature, where some ice is allowed or snow only has to
+   * stay loose; null where it is that of the curve.
+   */
+  readonly promisedMassFraction: number | null;
   /** The road at that time; null when bare and dry. */
   readonly now: BrineState | null;
   readonly past: readonly BrineState[];

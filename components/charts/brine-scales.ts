@@ -1,7 +1,7 @@
 import { scaleLinear } from '@visx/scale';
 import { toDisplay, type UnitSystem } from '@/lib/units/quantity';
 import { strengthAt, type BrineContent } from './brine-content';
-import { placeLabels, type LabelToPlace, type PlacedLabel } from './place-labels';
+import { placeLabels, type Box, type LabelToPlace, type PlacedLabel } from './place-labels';
 
 export interface BrineFrame {
   readonly widthPx: number;
@@ -65,11 +65,45 @@ const widthOf = (text: string) => Math.ceil(text.length * 6.6) + 2;
 export interface BrineWords {
   readonly pavement: string;
   readonly refreezes: string | null;
+  readonly promise: string | null;
   readonly brine: string;
   readonly ice: string;
 }
 
-/** Where the words of the chart stand, so that none covers another, the road's point or the pavement line. */
+type Corner = readonly [x: number, y: number];
+
+const label = (key: string, text: string, corners: readonly Corner[]): LabelToPlace => ({
+  key,
+  widthPx: widthOf(text),
+  heightPx,
+  candidates: corners.map(([x, y]) => ({ x, y })),
+});
+
+/** Places for a word that belongs to a tick on the pavement line. */
+function beside(x: number, lineY: number, width: number): Corner[] {
+  return [
+    [x - width - 7, lineY + 5],
+    [x - width + 4, lineY + 20],
+    [x + 12, lineY - 19],
+    [x + 22, lineY + 4],
+    [x - 4, lineY + 20],
+    [x - 4, lineY + 36],
+    [x + 12, lineY - 35],
+    [x + 60, lineY + 4],
+  ];
+}
+
+function tickLabels(content: BrineContent, words: BrineWords, scales: BrineScales): LabelToPlace[] {
+  const lineY = scales.y(content.pavementTempC);
+  const crossing = strengthAt(content.iceBranch, content.pavementTempC);
+  const at = (key: string, text: string | null, massFraction: number | null) =>
+    text === null || massFraction === null
+      ? []
+      : [label(key, text, beside(scales.x(massFraction), lineY, widthOf(text)))];
+  return [...at('refreezes', words.refreezes, crossing), ...at('promise', words.promise, content.promisedMassFraction)];
+}
+
+/** Where the words of the chart stand, so that none covers another, the road's point, the curve or the pavement line. */
 export function brineLabels(
   content: BrineContent,
   words: BrineWords,
@@ -77,71 +111,42 @@ export function brineLabels(
 ): PlacedLabel[] {
   const lineY = scales.y(content.pavementTempC);
   const right = frame.widthPx - frame.right;
-  const box = {
-    x: frame.left + 2,
-    y: frame.top - 8,
-    width: right - frame.left - 2,
-    height: frame.heightPx - frame.bottom - frame.top + 8,
-  };
-  const point = content.now ? { x: scales.x(content.now.massFraction) - 8, y: lineY - 8, width: 16, height: 16 } : null;
-  const crossing = strengthAt(content.iceBranch, content.pavementTempC);
-  const label = (key: string, text: string, corners: readonly (readonly [number, number])[]): LabelToPlace => ({
-    key,
-    widthPx: widthOf(text),
-    heightPx,
-    candidates: corners.map(([x, y]) => ({ x, y })),
-  });
+  const floor = frame.heightPx - frame.bottom;
+  const box = { x: frame.left + 2, y: frame.top - 8, width: right - frame.left - 2, height: floor - frame.top + 8 };
   const pavementX = right - widthOf(words.pavement);
+  const brineX = right - widthOf(words.brine);
+  const iceX = frame.left + 12;
+  const rows = (x: number, ys: readonly number[]) => ys.map((y): Corner => [x, y]);
+  const pavementRows = [-17, 3, 8, 18, -31, 30, -46].map((shift) => lineY + shift);
   const labels = [
     label(
       'pavement',
       words.pavement,
-      [-17, 3, 8, 18, -31, 30, -46].flatMap((shift) => [
-        [pavementX, lineY + shift] as const,
-        [frame.left + 4, lineY + shift] as const,
+      pavementRows.flatMap((y): Corner[] => [
+        [pavementX, y],
+        [frame.left + 4, y],
       ]),
     ),
-  ];
-  if (words.refreezes !== null && crossing !== null) {
-    const x = scales.x(crossing);
-    const width = widthOf(words.refreezes);
-    labels.push(
-      label('refreezes', words.refreezes, [
-        [x - width - 7, lineY + 5],
-        [x - width + 4, lineY + 20],
-        [x + 12, lineY - 19],
-        [x + 22, lineY + 4],
-        [frame.left + 4, lineY + 5],
-        [x + 12, lineY - 35],
-        [x + 60, lineY + 4],
-      ]),
-    );
-  }
-  const iceX = frame.left + 12;
-  const floor = frame.heightPx - frame.bottom;
-  labels.push(
-    label('ice', words.ice, [
-      [iceX, floor - 22],
-      [iceX, lineY + 12],
-      [iceX, lineY + 26],
-      [iceX, lineY - 24],
-    ]),
-  );
-  const brineX = right - widthOf(words.brine);
-  labels.push(
+    ...tickLabels(content, words, scales),
+    label('ice', words.ice, rows(iceX, [floor - 22, lineY + 12, lineY + 26, lineY - 24])),
     label('brine', words.brine, [
       [brineX, frame.top],
       [brineX - 70, frame.top],
-      [brineX, lineY + 22],
-      [brineX, lineY - 40],
+      ...rows(brineX, [lineY + 22, lineY - 40]),
     ]),
-  );
-  const line = { x: frame.left, y: lineY - 1.5, width: right - frame.left, height: 3 };
+  ];
+  return placeLabels(labels, box, obstacles(content, { frame, scales }));
+}
+
+function obstacles(content: BrineContent, { frame, scales }: { frame: BrineFrame; scales: BrineScales }): Box[] {
+  const lineY = scales.y(content.pavementTempC);
+  const width = frame.widthPx - frame.right - frame.left;
   const curve = content.iceBranch.map(({ massFraction, tempC }) => ({
     x: scales.x(massFraction) - 2,
     y: scales.y(tempC) - 2,
     width: 4,
     height: 4,
   }));
-  return placeLabels(labels, box, [...(point ? [point] : []), line, ...curve]);
+  const point = content.now ? [{ x: scales.x(content.now.massFraction) - 8, y: lineY - 8, width: 16, height: 16 }] : [];
+  return [...point, { x: frame.left, y: lineY - 1.5, width, height: 3 }, ...curve];
 }

@@ -1,4 +1,4 @@
-import { type BrineContent, type BrineState, type CurvePoint } from '@/components/charts/brine-content';
+import { strengthAt, type BrineContent, type BrineState, type CurvePoint } from '@/components/charts/brine-content';
 import { DRY_MM } from '@/lib/road/partition';
 import { indexAt, timeAt } from '@/lib/time/step-axis';
 import { valueAt, type Storm } from './decode-storm';
@@ -36,6 +36,19 @@ function saltOf(storm: Storm, row: number): string {
   return last ?? materials[planned?.materials[row] ?? -1]?.mainSalt ?? 'NaCl';
 }
 
+/**
+ * Strength that just keeps the promise. The margin is against the promise, so that brine `margin` colder than the
+ * pavement is what lies there divided by the share promised: the same share of the curve's strength is what is needed.
+ */
+function promisedAt(now: BrineState | null, marginC: number | null, iceBranch: readonly CurvePoint[]): number | null {
+  if (!now || marginC === null || now.massFraction <= 0) return null;
+  const reached = strengthAt(iceBranch, now.tempC - marginC);
+  const onCurve = strengthAt(iceBranch, now.tempC);
+  if (reached === null || onCurve === null || reached <= 0) return null;
+  const share = now.massFraction / reached;
+  return share > 0 && share < 0.97 ? share * onCurve : null;
+}
+
 /** A road's brine around a time, against the curve of its salt; null when its pavement is not known. */
 export function brineOf(storm: Storm, road: { row: number; at: number }, curves: Curves): BrineContent | null {
   const { row, at } = road;
@@ -44,6 +57,7 @@ export function brineOf(storm: Storm, road: { row: number; at: number }, curves:
   const curve = curves[saltOf(storm, row)] ?? curves['NaCl'];
   if (pavementTempC === null || !curve) return null;
   const nowAt = timeAt(storm.axis, step);
+  const now = stateAt(storm, row, at);
   const times = (minutes: readonly number[]) => minutes.map((minute) => at + minute * 60_000);
   return {
     saltName: curve.name,
@@ -51,7 +65,8 @@ export function brineOf(storm: Storm, road: { row: number; at: number }, curves:
     saltBranch: curve.saltBranch,
     pavementTempC,
     pavementAt: nowAt,
-    now: stateAt(storm, row, at),
+    promisedMassFraction: promisedAt(now, valueAt(storm, 'marginC', { row, step }), curve.iceBranch),
+    now,
     past: statesAt(storm, row, times(pastMin)).filter((state) => state.at < nowAt),
     future: statesAt(storm, row, times(futureMin)).filter((state) => state.at > nowAt),
   };
