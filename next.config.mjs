@@ -5,7 +5,7 @@ import { fileURLToPath } from 'node:url';
 const distDir = process.env.RIMEWRIGHT_DIST || '.next';
 
 /** @type {import('next').NextConfig} */
-export default {
+const nextConfig = {
   distDir,
   reactStrictMode: true,
   reactCompiler: true,
@@ -34,3 +34,5 @@ export default {
     ];
   },
 };
+
+export default nextConfig;

@@ -29,8 +29,8 @@ afterAll(() => db.close());
 
 describe.each(files)('%s', (file) => {
   it('refuses the signed-out and every role the table refuses, before it reads what was sent', async () => {
-    const module = (await import(path.join(root, 'app', file))) as Record<string, Act>;
-    const made = Object.entries(module).filter(([, act]) => typeof act === 'function');
+    const doors = (await import(path.join(root, 'app', file))) as Record<string, Act>;
+    const made = Object.entries(doors).filter(([, act]) => typeof act === 'function');
     expect(made.length).toBeGreaterThan(0);
     for (const [name, act] of made) {
       const action = act[madeByAction];
