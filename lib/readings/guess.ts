@@ -82,6 +82,33 @@ const noTable: Guess = {
   todo: 'Choose a CSV file with a time and at least one measured value on each line.',
 };
 
+/** The table cut into heads and body, after lines that are none. */
+interface Cut {
+  columnNames: string[];
+  hasHeader: boolean;
+  skipLines: number;
+  body: (readonly string[])[];
+}
+
+function cut({ rows, width }: Table): Cut | null {
+  const start = rows.slice(0, MOST_SKIPPED).findIndex(({ cells }) => cells.length === width);
+  const [first, ...rest] = rows.slice(Math.max(0, start));
+  if (!first) return null;
+  const hasHeader = !first.cells.some(isNumberLike);
+  const body = (hasHeader ? rest : [first, ...rest]).map(({ cells }) => cells).filter(({ length }) => length === width);
+  return { columnNames: columnNamesOf(first.cells, hasHeader), hasHeader, skipLines: first.line - 1, body };
+}
+
+const doubtedClock: Doubt = {
+  part: 'clock',
+  sentence: 'The file does not say by whose clock its times are told, nor whether one column keeps another’s.',
+};
+const noTime: Doubt = {
+  part: 'time',
+  sentence: 'No column looks like a time: say which it is and how it is laid out.',
+};
+const noHeads: Doubt = { part: 'table', sentence: 'No head tells what is measured: say it for each column.' };
+
 /**
  * Proposes how a file is to be read, from its first bytes (64 kB are plenty): encoding, delimiter, decimal mark, heads,
  * time layout, what each column measures and in what unit. `doubts` are what a person should look at. It cannot know
@@ -92,53 +119,28 @@ export function guessMapping({ bytes, isWhole, clock }: Head): Guess {
   if (unreadable) return { ok: false, ...unreadable };
   const encoding = guessEncoding(bytes, isWhole);
   const table = bestTable(decodeHead(bytes, encoding, isWhole));
-  if (!table) return noTable;
-  const start = table.rows.slice(0, MOST_SKIPPED).findIndex(({ cells }) => cells.length === table.width);
-  const rows = table.rows.slice(Math.max(0, start));
-  const [first, ...rest] = rows;
-  if (!first) return noTable;
-  const hasHeader = !first.cells.some(isNumberLike);
-  const columnNames = columnNamesOf(first.cells, hasHeader);
-  const body = (hasHeader ? rest : rows).filter(({ cells }) => cells.length === table.width);
+  const parts = table && cut(table);
+  if (!parts) return noTable;
+  const { columnNames, body, hasHeader, skipLines } = parts;
   if (body.length === 0) {
     return { ok: false, reason: 'The file has heads and no rows.', todo: 'Choose a file with readings in it.' };
   }
-  const columnOf = (index: number) => body.map(({ cells }) => cells[index] ?? '');
-  const decimalMark = decimalMarkOf(
-    body.flatMap(({ cells }) => cells),
-    table.delimiter,
-  );
-  const time = guessTime(columnNames, columnOf);
-  const doubts: Doubt[] = [
-    {
-      part: 'clock',
-      sentence: 'The file does not say by whose clock its times are told, nor whether one column keeps another’s.',
-    },
-  ];
-  if (!time)
-    doubts.push({ part: 'time', sentence: 'No column looks like a time: say which it is and how it is laid out.' });
-  const layout = time?.time ?? { kind: 'one' as const, column: columnNames[0] ?? '', pattern: 'iso' };
-  const taken = new Set(timeColumnsOf(layout));
-  const measured = guessColumns(
+  const columnOf = (index: number) => body.map((cells) => cells[index] ?? '');
+  const { delimiter } = table;
+  const decimalMark = decimalMarkOf(body.flat(), delimiter);
+  const guessed = guessTime(columnNames, columnOf);
+  const time = guessed?.time ?? { kind: 'one' as const, column: columnNames[0] ?? '', pattern: 'iso' };
+  const taken = new Set(timeColumnsOf(time));
+  const { columns, doubts } = guessColumns(
     columnNames.map((name) => (taken.has(name) ? '' : name)),
     (index) => numbersIn(columnOf(index), decimalMark),
-    time?.stepMin ?? 60,
+    guessed?.stepMin ?? 60,
   );
-  if (measured.columns.length === 0) {
-    doubts.push({ part: 'table', sentence: 'No head tells what is measured: say it for each column.' });
-  }
-  const mapping: Mapping = {
-    version: 1,
-    encoding,
-    delimiter: table.delimiter,
-    quote: '"',
-    decimalMark,
-    hasHeader,
-    skipLines: first.line - 1,
-    clock,
-    time: layout,
-    missing: usualMissing,
-    columns: measured.columns,
+  const made = { encoding, delimiter, quote: '"' as const, decimalMark, hasHeader, skipLines };
+  return {
+    ok: true,
+    mapping: { version: 1, ...made, clock, time, missing: usualMissing, columns },
+    columnNames,
+    doubts: [doubtedClock, ...(guessed?.doubts ?? [noTime]), ...(columns.length === 0 ? [noHeads] : []), ...doubts],
   };
-  return { ok: true, mapping, columnNames, doubts: [...doubts, ...(time?.doubts ?? []), ...measured.doubts] };
 }

@@ -43,7 +43,7 @@ function freshColumn(name: string, quantity: ReadingQuantity): ColumnMapping {
 }
 
 export const columnGrid =
-  'grid gap-x-3 gap-y-2 lg:grid-cols-[minmax(7rem,1.1fr)_minmax(9rem,1.3fr)_7rem_minmax(9rem,1.2fr)_minmax(6rem,0.8fr)]';
+  'grid grid-cols-2 gap-x-3 gap-y-2 lg:grid-cols-[minmax(7rem,1.1fr)_minmax(9rem,1.3fr)_7rem_minmax(9rem,1.2fr)_minmax(6rem,0.8fr)]';
 
 /** One column of the file: what it measures, in what unit, by whose clock, and what stands for missing. */
 export function ColumnRow({ name, samples, column, stationZone, error, onChange }: ColumnRowProps) {
@@ -54,7 +54,7 @@ export function ColumnRow({ name, samples, column, stationZone, error, onChange 
   return (
     <li className="grid gap-2 border-b py-3 lg:py-2">
       <div className={columnGrid}>
-        <div className="min-w-0">
+        <div className="col-span-2 min-w-0 lg:col-span-1">
           <p className="font-semibold wrap-anywhere">{name}</p>
           <p className="truncate font-mono text-sm text-faint" title={samples.join('  ')}>
             {samples.join('  ')}
@@ -125,7 +125,7 @@ function ReadColumn({ name, column, stationZone, onChange }: ReadColumnProps) {
 
 function Interval({ name, column, onChange }: Omit<ReadColumnProps, 'stationZone'>) {
   return (
-    <div className="flex flex-wrap items-center gap-x-2 gap-y-1.5 text-sm text-soft lg:col-span-4 lg:col-start-2">
+    <div className="flex flex-wrap items-center gap-x-2 gap-y-1.5 text-sm text-soft col-span-2 lg:col-span-4 lg:col-start-2">
       <span>gathered over</span>
       <TextInput
         aria-label={`Minutes over which “${name}” is gathered`}

@@ -68,7 +68,6 @@ export function PreviewTable({ rows, columns, zone }: PreviewTableProps) {
       caption="The first rows as they will be understood"
       rows={rows}
       rowKey={(row) => row.line}
-      className="max-h-128"
       columns={[
         { key: 'line', head: 'Line', isRowHead: true, isNumber: true, className: 'w-12', cell: (row) => row.line },
         {

@@ -7,22 +7,25 @@ import { Table } from '@/components/ui/table';
 import { Tag } from '@/components/ui/tag';
 import { useUnits } from '@/components/ui/units';
 import { useNow } from '@/components/ui/use-now';
-import { relativeInWords } from '@/lib/time/format';
+import { formatDate, relativeInWords } from '@/lib/time/format';
 import { unitLabel } from '@/lib/units/quantity';
 import { type StationNow } from './listed-station';
 
 /** Older than this a reading is stale, and older than that it counts as missing for decisions. Common practice, no source. */
 const STALE_MIN = 30;
 const MISSING_MIN = 120;
+/** From here on a date says more than a count of hours. */
+const LONG_AGO_MIN = 2 * 1440;
 
 export type StationsTableProps = Readonly<{ stations: readonly StationNow[] }>;
 
-function Age({ observedAt }: Readonly<{ observedAt: string | null }>) {
+function Age({ observedAt, zone }: Readonly<{ observedAt: string | null; zone: string }>) {
   const now = useNow();
   if (observedAt === null) return <span className="text-faint">no reading yet</span>;
   if (now === null) return null;
   const at = new Date(observedAt);
   const ageMin = (now - at.getTime()) / 60_000;
+  if (ageMin > LONG_AGO_MIN) return <Tag tone="frozen">missing since {formatDate(at, zone)}</Tag>;
   const words = relativeInWords(at, now);
   if (ageMin > MISSING_MIN) return <Tag tone="frozen">{words}, missing</Tag>;
   return ageMin > STALE_MIN ? (
@@ -57,7 +60,11 @@ export function StationsTable({ stations }: StationsTableProps) {
             </Link>
           ),
         },
-        { key: 'age', head: 'Last reading', cell: (station) => <Age observedAt={station.observedAt} /> },
+        {
+          key: 'age',
+          head: 'Last reading',
+          cell: (station) => <Age observedAt={station.observedAt} zone={station.zone} />,
+        },
         {
           key: 'pavement',
           head: `Pavement, ${degrees}`,

@@ -1,4 +1,3 @@
-import { DownloadLink } from '@/components/ui/link-button';
 import { Table } from '@/components/ui/table';
 import { formatDateTime } from '@/lib/time/format';
 import { formatNumber } from '@/lib/units/format';
@@ -45,15 +44,14 @@ export function UploadsTable({ uploads, zone }: UploadsTableProps) {
           isNumber: true,
           cell: (upload) =>
             upload.rowsRejected > 0 ? (
-              <DownloadLink
+              <a
                 href={`/api/uploads/${upload.id}/rejects.csv`}
-                variant="quiet"
-                size="small"
-                className="-my-1 text-ink underline"
+                download
+                className="link"
                 aria-label={`Download the ${upload.rowsRejected} rejected rows of ${upload.fileName}`}
               >
                 {formatNumber(upload.rowsRejected, 0)}
-              </DownloadLink>
+              </a>
             ) : (
               figure(0)
             ),

@@ -8,12 +8,17 @@ import { type Progress as UploadProgress } from './upload-readings';
 type LoadingProps = Readonly<{ progress: UploadProgress; fileName: string; onStop: () => void }>;
 
 export function Loading({ progress, fileName, onStop }: LoadingProps) {
-  const rows = `${formatNumber(progress.rows, 0)} rows read`;
+  const isSending = progress.kind === 'sending';
+  const detail = isSending
+    ? `${Math.round(progress.fraction * 100)} %, ${(progress.bytes / 1e6).toFixed(1)} MB`
+    : progress.rows > 0
+      ? `${formatNumber(progress.rows, 0)} rows read`
+      : undefined;
   return (
     <Progress
-      label={progress.kind === 'sending' ? `Sending and reading ${fileName}` : 'Storing the readings'}
-      fraction={progress.kind === 'sending' ? progress.fraction : null}
-      detail={progress.kind === 'sending' ? `${Math.round(progress.fraction * 100)} %, ${rows}` : rows}
+      label={isSending ? `Sending and reading ${fileName}` : 'Storing the readings'}
+      fraction={isSending ? progress.fraction : null}
+      detail={detail}
       action={
         <Button size="small" onClick={onStop}>
           Stop

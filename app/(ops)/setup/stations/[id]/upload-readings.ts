@@ -2,7 +2,7 @@ import { ImportProgressLine, type ImportReadingsReply } from '@/lib/contracts/re
 import { Problem, presentProblem, type ProblemView } from '@/lib/problem';
 import { READINGS_FILE_BYTES } from '@/lib/readings/bytes';
 
-export type Progress = { kind: 'sending'; fraction: number; rows: number } | { kind: 'storing'; rows: number };
+export type Progress = { kind: 'sending'; fraction: number; bytes: number } | { kind: 'storing'; rows: number };
 
 export type UploadOutcome =
   | { ok: true; reply: ImportReadingsReply }
@@ -38,22 +38,17 @@ export function uploadReadings({
   return new Promise((resolve) => {
     const request = new XMLHttpRequest();
     const query = new URLSearchParams({ station: String(stationId), fileName: file.name.slice(-200), mappingSavedAt });
-    let rows = 0;
-    let isSent = false;
     request.open('POST', `/api/import/readings?${query}`);
     request.setRequestHeader('content-type', 'text/csv');
     request.setRequestHeader('accept', 'application/x-ndjson');
-    request.upload.onprogress = ({ loaded, total }) => onProgress({ kind: 'sending', fraction: loaded / total, rows });
+    request.upload.onprogress = ({ loaded, total }) =>
+      onProgress({ kind: 'sending', fraction: loaded / total, bytes: loaded });
+    // A browser hands on what the server tells only when all is sent; the server reads as fast as it takes.
     request.onprogress = () => {
       const last = linesOf(request.responseText).at(-1);
-      if (last?.kind === 'reading' && !isSent) rows = last.rows;
-      if (last?.kind === 'storing' || (isSent && last?.kind === 'reading'))
-        onProgress({ kind: 'storing', rows: last.rows });
+      if (last?.kind === 'reading' || last?.kind === 'storing') onProgress({ kind: 'storing', rows: last.rows });
     };
-    request.upload.onload = () => {
-      isSent = true;
-      onProgress({ kind: 'storing', rows });
-    };
+    request.upload.onload = () => onProgress({ kind: 'storing', rows: 0 });
     request.onload = () => resolve(read(request));
     request.onerror = () => resolve({ ok: false, problem: unreachable });
     request.onabort = () => resolve({ ok: false, problem: null });

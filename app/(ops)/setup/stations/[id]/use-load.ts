@@ -37,7 +37,7 @@ export function useLoad({ file, station, mapping, onLoaded }: Loaded) {
   const start = () => {
     controller.current = new AbortController();
     setProblem(null);
-    setProgress({ kind: 'sending', fraction: 0, rows: 0 });
+    setProgress({ kind: 'sending', fraction: 0, bytes: 0 });
     run(controller.current.signal)
       .catch(() => notSaved)
       .then((found) => {
