@@ -68,7 +68,11 @@ export function ChosenPanel({ storm, road, facts, cursorAt, nowAt, zone, curves,
       why={source ? whyInWords(source, context) : null}
       zone={zone}
       nowAt={nowAt}
-      noPlan="No treatment is worked out for this road yet."
+      noPlan={
+        storm.view.isClosed
+          ? 'The storm is over. What was done stands in the Ledger.'
+          : 'No treatment is worked out for this road yet.'
+      }
     />
   );
 }

@@ -61,8 +61,11 @@ type Station = Storm['view']['stations'][number];
 
 function lateInWords(late: readonly Station[], { all, nowAt }: { all: number; nowAt: number }): string {
   const oldest = late.reduce((a, b) => ((b.newestAt ?? -Infinity) < (a.newestAt ?? -Infinity) ? b : a));
-  const heard = oldest.newestAt === null ? 'never' : relativeInWords(oldest.newestAt, nowAt);
-  if (late.length === 1) return `${oldest.name} was last heard ${heard}.`;
+  const heard =
+    oldest.newestAt === null
+      ? 'has not been heard at all'
+      : `was last heard ${relativeInWords(oldest.newestAt, nowAt)}`;
+  if (late.length === 1) return `${oldest.name} ${heard}.`;
   const who = late.length === all ? `All ${all} stations` : `${late.length} of ${all} stations`;
-  return `${who} are silent for over half an hour; ${oldest.name} was last heard ${heard}.`;
+  return `${who} are silent for over half an hour; ${oldest.name} ${heard}.`;
 }
