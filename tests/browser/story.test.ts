@@ -67,6 +67,33 @@ describe.each(nights)('the whole job, $theme', ({ theme, driver, name }) => {
     await leave();
   });
 
+  it('readings come in from a sensor file: good rows land, bad rows are kept with their reason', async () => {
+    const { page, leave } = await as(personOf.administrator, theme);
+    await page.goto('/setup/stations');
+    // each night its own station: the same file twice would rightly change nothing
+    await page
+      .getByRole('table')
+      .getByRole('link')
+      .nth(theme === 'dark' ? 0 : 1)
+      .click();
+    await page.getByRole('heading', { name: 'Load readings' }).waitFor();
+    await page.locator('input[type="file"]').setInputFiles(fixture('station-log.csv'));
+    const load = page.getByRole('button', { name: 'Load this file' });
+    await load.waitFor();
+    expect(await axe(page)).toEqual([]);
+    await load.click();
+    await page.getByText('station-log.csv is read.').waitFor();
+    await page
+      .getByText(/“broken”/)
+      .first()
+      .waitFor();
+    const started = page.waitForEvent('download');
+    await page.getByRole('link', { name: 'Download the rejected rows' }).first().click();
+    const rejected = readFileSync(await (await started).path(), 'utf8');
+    expect(rejected.trim().split(/\r?\n/)).toHaveLength(3);
+    await leave();
+  });
+
   it('a pass is worked out and published', async () => {
     const { page, leave } = await as(personOf.dispatcher, theme);
     await page.goto('/storm');
