@@ -25,6 +25,7 @@ export class Upload extends Model<InferAttributes<Upload>, InferCreationAttribut
   declare rowsUnchanged: number;
   declare rowsRejected: number;
   declare rowsFlagged: number;
+  declare rowsEmpty: CreationOptional<number>;
 }
 
 export function initUpload(sequelize: Sequelize): typeof Upload {
@@ -47,6 +48,7 @@ export function initUpload(sequelize: Sequelize): typeof Upload {
       rowsUnchanged: { type: DataTypes.INTEGER, allowNull: false },
       rowsRejected: { type: DataTypes.INTEGER, allowNull: false },
       rowsFlagged: { type: DataTypes.INTEGER, allowNull: false },
+      rowsEmpty: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
     },
     { sequelize, tableName: 'uploads', timestamps: false },
   );

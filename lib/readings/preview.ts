@@ -65,7 +65,7 @@ export function previewFile(mapping: Mapping, { bytes, isWhole, nowMs, rowCount 
     if (result.ok) preview.goodCount += 1;
     else preview.badCount += 1;
     if (preview.rows.length < rowCount) preview.rows.push(row);
-    else if (!result.ok) preview.firstBad ??= row;
+    else if (!result.ok && preview.badCount === 1) preview.firstBad = row;
   });
   const pushed = splitter.push(decodeHead(bytes, mapping.encoding, isWhole));
   const ended = pushed.ok ? splitter.end() : pushed;

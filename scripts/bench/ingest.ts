@@ -11,8 +11,9 @@ import { closeDatabase, database } from '@/db/connection';
 import { createMigrator } from '@/db/migrate';
 import { migrations } from '@/db/migrations/all';
 import { readingColumns } from '@/db/queries/readings';
-import { env, resetEnv } from '@/lib/server/env';
+import { resetEnv } from '@/lib/server/env';
 import { columnOf, mappingOf } from '@/lib/readings/test-mapping';
+import { borrowCluster } from '../setup/cluster.mjs';
 
 interface IngestBench {
   rows: number;
@@ -64,7 +65,8 @@ async function writeCsv(file: string, rows: number): Promise<void> {
 
 /** A database of the bench's own on the same server, gone afterwards. */
 async function inScratchDatabase<T>(work: (url: string) => Promise<T>): Promise<T> {
-  const given = env().DATABASE_URL;
+  const { adminUrl: given, release } = await openServer();
+  const before = process.env.DATABASE_URL;
   const name = `rimewright_bench_${process.pid}`;
   const admin = new pg.Client(given);
   await admin.connect();
@@ -79,11 +81,21 @@ async function inScratchDatabase<T>(work: (url: string) => Promise<T>): Promise<
     return await work(url.href);
   } finally {
     await closeDatabase();
-    process.env.DATABASE_URL = given;
+    if (before === undefined) delete process.env.DATABASE_URL;
+    else process.env.DATABASE_URL = before;
     resetEnv();
     await admin.query(`drop database if exists ${name} with (force)`);
     await admin.end();
+    await release();
   }
+}
+
+/** The server that DATABASE_URL names, or the private cluster of this checkout. */
+async function openServer(): Promise<{ adminUrl: string; release: () => Promise<unknown> }> {
+  const given = process.env.DATABASE_URL;
+  if (given) return { adminUrl: given, release: async () => undefined };
+  const cluster = await borrowCluster('bench');
+  return { adminUrl: cluster.urlOf('postgres'), release: cluster.release };
 }
 
 const copied = ['observed_at', ...mapping.columns.map(({ quantity }) => readingColumns[quantity])].join(', ');
