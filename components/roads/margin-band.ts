@@ -55,6 +55,7 @@ export function holdInFigures(minutes: number | null, longestMin: number): strin
   if (minutes === null) return '\u2013';
   const whole = Math.round(Math.min(Math.abs(minutes), longestMin));
   const text = `${Math.floor(whole / 60)}:${String(whole % 60).padStart(2, '0')}`;
-  if (minutes > longestMin) return `>${Math.floor(longestMin / 60)} h`;
+  if (minutes > longestMin)
+    return longestMin < 1 ? '\u2013' : longestMin < 60 ? `>${text}` : `>${Math.floor(longestMin / 60)} h`;
   return minutes < 0 && whole > 0 ? `${MINUS}${text}` : text;
 }

@@ -183,6 +183,8 @@ describe('bands of the freeze margin', () => {
   it('a hold beyond the forecast says so', () => {
     expect(holdInFigures(35, 600)).toBe('0:35');
     expect(holdInFigures(Infinity, 610)).toBe('>10 h');
+    expect(holdInFigures(Infinity, 20)).toBe('>0:20');
+    expect(holdInFigures(Infinity, 0)).toBe('\u2013');
     expect(holdInFigures(null, 600)).toBe('\u2013');
   });
 });
