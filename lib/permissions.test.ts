@@ -21,7 +21,7 @@ const expected: Record<Action, string> = {
   'yard.view': 'a · a a a a',
   'ledger.view': 'a · a · a a',
   'bench.use': 'a a a a a a',
-  'setup.view': '· · a · a ·',
+  'setup.view': 'a · a · a ·',
   'setup.people': '· · · · a ·',
   'setup.roads': '· · · · a ·',
   'setup.stations': '· · · · a ·',

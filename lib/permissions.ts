@@ -73,7 +73,7 @@ export const permissions = {
   'yard.view': { does: 'see the yards', grants: all('dispatcher', 'supervisor', 'yard', 'administrator', 'observer') },
   'ledger.view': { does: 'see the ledger', grants: all('dispatcher', 'supervisor', 'administrator', 'observer') },
   'bench.use': { does: 'use the brine bench', grants: everyone },
-  'setup.view': { does: 'see the set-up', grants: all('administrator', 'supervisor') },
+  'setup.view': { does: 'see the set-up', grants: all('administrator', 'supervisor', 'dispatcher') },
   'setup.people': { does: 'change people and their roles', grants: all('administrator') },
   'setup.roads': { does: 'change the road network', grants: all('administrator') },
   'setup.stations': { does: 'change stations and their keys', grants: all('administrator') },
