@@ -34,7 +34,7 @@ const pathOf = (points: readonly { x: number; y: number }[]) =>
   points.map((point, index) => `${index === 0 ? 'M' : 'L'}${point.x.toFixed(1)} ${point.y.toFixed(1)}`).join('');
 
 /** The freezing curve, with this road's brine sliding along its days towards it. */
-export function BrineChart({ content, zone, heightPx = 172, caption }: BrineChartProps) {
+export function BrineChart({ content, zone, heightPx = 152, caption }: BrineChartProps) {
   const system = useUnits();
   const [watch, widthPx] = useMeasuredWidth();
   const frame = brineFrame(widthPx, heightPx);
