@@ -105,6 +105,14 @@ describe('carrying to a road', () => {
     expect(parts[0]?.weight).toBeGreaterThan(0.8);
   });
 
+  it('a road beyond the reach of every station is unknown, never that station’s temperature', () => {
+    const far = { ...site, latDeg: 60.9 };
+    expect(carryParts(far, stations)).toEqual([]);
+    const { tempsC, status } = carry(far, carryParts(far, stations), series(stations));
+    expect(tempsC.every((tempC) => Number.isNaN(tempC))).toBe(true);
+    expect(status).toBe('missing');
+  });
+
   it('alike stations give their own temperature, 100 m higher is 0.65 °C colder, a bridge a degree', () => {
     const at = (change: Partial<Site>) => {
       const here = { ...site, ...change };

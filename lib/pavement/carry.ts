@@ -32,6 +32,8 @@ const BRIDGE_OFFSET_C = -1;
 const TUNNEL_OFFSET_C = 3;
 /** Stations a road is carried from. */
 const NEAREST = 3;
+/** Farther than this a station says nothing about a road, m; common practice, no source. */
+export const STATION_REACH_M = 50_000;
 /** Nearer than this counts as this, m, so that a road beside a station does not divide by nothing. */
 const NEAR_M = 200;
 
@@ -69,7 +71,8 @@ export function siteOffsetC({ exposure, isBridge, isTunnel = false }: Site): num
 
 /**
  * The nearest stations of a site, at most three, weighted by 1/d² (inverse distance: common practice, no source), each
- * with the height difference at 6.5 °C a kilometre. Empty without stations.
+ * with the height difference at 6.5 °C a kilometre. Empty where no station is within 50 km: the road is then unknown, which
+ * is never shown as clear.
  */
 export function carryParts(
   site: Site,
@@ -82,6 +85,7 @@ export function carryParts(
       distanceM: Math.hypot((lonDeg - site.lonDeg) * lonM, (latDeg - site.latDeg) * latM),
       heightOffsetC: (heightM - site.heightM) * LAPSE_C_PER_M,
     }))
+    .filter(({ distanceM }) => distanceM <= STATION_REACH_M)
     .sort((a, b) => a.distanceM - b.distanceM)
     .slice(0, NEAREST)
     .map((part) => ({ ...part, raw: 1 / Math.max(NEAR_M, part.distanceM) ** 2 }));
