@@ -16,13 +16,12 @@ interface Recommendation {
   rateGPerM2: number | null;
 }
 
-/** What the newest plan published before the road was spread asked for on it. */
+/** What the plan in force when the road was spread asked for on it. */
 async function recommendationFor(tx: Tx, about: { stormId: number | null; segmentId: number; spreadAt: Date }) {
   const rows = await selectRows<Recommendation>(
     `select t.plan_id as "planId", t.material_id as "materialId", t.rate_g_per_m2 as "rateGPerM2"
-       from plan_treatments t join plans p on p.id = t.plan_id
-      where p.storm_id = :stormId and t.segment_id = :segmentId and p.published_at <= :spreadAt
-      order by p.published_at desc limit 1`,
+       from plan_treatments t
+      where t.plan_id = plan_in_force(:stormId, :spreadAt) and t.segment_id = :segmentId`,
     about,
     tx,
   );

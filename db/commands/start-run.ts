@@ -21,12 +21,11 @@ async function segmentsFor(tx: Tx, input: StartRunInput): Promise<number[]> {
   return rows.map((row) => row.id);
 }
 
-/** The storm the run belongs to and the newest plan published for it by then. */
+/** The storm the run belongs to and the plan in force for it then. */
 async function stormAndPlan(tx: Tx, startedAt: Date): Promise<{ stormId: number | null; planId: number | null }> {
   const rows = await selectRows<{ stormId: number; planId: number | null }>(
     `select s.id as "stormId",
-            (select p.id from plans p where p.storm_id = s.id and p.published_at <= :startedAt
-              order by p.published_at desc limit 1) as "planId"
+            plan_in_force(s.id, :startedAt) as "planId"
        from storms s
       where s.opened_at <= :startedAt and (s.closed_at is null or s.closed_at > :startedAt)
       order by s.opened_at desc limit 1`,

@@ -8,6 +8,7 @@ import * as auditLog from './20261201T090600-create-audit-log';
 import * as networkSources from './20261201T091000-mark-network-sources';
 import * as mergeReadings from './20261201T092000-merge-readings';
 import * as segmentEnds from './20261201T092500-index-segment-ends';
+import * as planInForce from './20261201T093000-find-plan-in-force';
 
 /** In order; an imported list, since files cannot be looked up by name in a bundle. */
 export const migrations = [
@@ -21,4 +22,5 @@ export const migrations = [
   { name: '20261201T091000-mark-network-sources', ...networkSources },
   { name: '20261201T092000-merge-readings', ...mergeReadings },
   { name: '20261201T092500-index-segment-ends', ...segmentEnds },
+  { name: '20261201T093000-find-plan-in-force', ...planInForce },
 ];

@@ -113,7 +113,7 @@ export interface RunRoadRecord {
 }
 
 /**
- * The roads of a run in order, each with what the newest published plan of its storm asks for and
+ * The roads of a run in order, each with what the plan in force asks for and
  * what was last logged on this run.
  */
 export async function listRunRoads({ id }: { id: string }): Promise<RunRoadRecord[]> {
@@ -126,11 +126,8 @@ export async function listRunRoads({ id }: { id: string }): Promise<RunRoadRecor
        from run_segments rs
        join runs r on r.id = rs.run_id
        join segments g on g.id = rs.segment_id
-       left join lateral (
-         select t.* from plan_treatments t join plans p on p.id = t.plan_id
-          where p.storm_id = r.storm_id and p.published_at is not null and t.segment_id = g.id
-            and p.published_at <= coalesce(r.finished_at, 'infinity')
-          order by p.published_at desc limit 1) pt on true
+       left join plan_treatments pt
+         on pt.segment_id = g.id and pt.plan_id = plan_in_force(r.storm_id, coalesce(r.finished_at, now()))
        left join materials pm on pm.id = pt.material_id
        left join lateral (
          select * from spread_entries e where e.run_id = r.id and e.segment_id = g.id

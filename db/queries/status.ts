@@ -26,20 +26,18 @@ export async function findPublicStorm(): Promise<PublicStorm | null> {
     `select s.id, s.number, s.name, s.opened_at as "openedAt", s.until_at as "untilAt",
             p.published_at as "publishedAt", p.pass_number as "passNumber"
        from storms s
-       left join lateral (
-         select published_at, pass_number from plans
-          where storm_id = s.id and published_at is not null order by published_at desc limit 1) p on true
+       left join plans p on p.id = plan_in_force(s.id, now())
       where s.closed_at is null
       order by s.opened_at desc limit 1`,
   );
   return rows[0] ?? null;
 }
 
-/** Roads by name, of the newest published plan, those not wholly treated first. Rates, materials, trucks and people are nobody's business here. */
+/** Roads by name, of the plan in force, those not wholly treated first. Rates, materials, trucks and people are nobody's business here. */
 export async function listPublicRoads({ stormId }: { stormId: number }): Promise<PublicRoad[]> {
   return selectRows<PublicRoad>(
     `with plan as (
-       select id from plans where storm_id = :stormId and published_at is not null order by published_at desc limit 1
+       select plan_in_force(:stormId, now()) as id
      ), storm as (
        select opened_at from storms where id = :stormId
      ), treated as (
