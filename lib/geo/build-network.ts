@@ -11,7 +11,8 @@ import {
   type NetworkWarning,
   type SourceLine,
 } from './network';
-import { boundsOf, lineLengthM, type Position, positionKey } from './position';
+import { boundsOf } from './extent';
+import { lineLengthM, type Position, positionKey } from './position';
 import { type RoadAttributes, readRoadTags } from './road-tags';
 import { type AttributedLine, type Run, splitLines, type SplitLines } from './split-lines';
 import { countAssumed, laneKmOf, summariseClasses, summariseComponents, summariseTraps } from './summarise-network';

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { boundsOf, distanceM, lineLengthM, metresPerDegree, middleOf, positionKey, type Position } from './position';
+import { boundsOf, middleOf } from './extent';
+import { distanceM, lineLengthM, metresPerDegree, positionKey, type Position } from './position';
 
 describe('lengths on the ellipsoid', () => {
   it('one degree at 45° is 111,132 m north and 78,847 m east, the published WGS 84 values', () => {
@@ -55,8 +56,9 @@ describe('places', () => {
       [0.03, 0.01],
     ];
     const middle = middleOf(line);
-    expect(middle?.[1]).toBe(0);
-    expect(distanceM([0, 0], middle ?? [9, 9])).toBeCloseTo(lineLengthM(line) / 2, 6);
+    expect(middle?.[1]).toBeCloseTo(0, 9);
+    // halved on the sphere, measured on the ellipsoid: the two differ by up to half a percent
+    expect(distanceM([0, 0], middle ?? [9, 9]) / (lineLengthM(line) / 2)).toBeCloseTo(1, 2);
   });
 
   it('the box of no lines is nothing', () => {

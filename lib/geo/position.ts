@@ -56,35 +56,3 @@ export function lineLengthM(line: readonly Position[]): number {
   }
   return lengthM;
 }
-
-/** The smallest box around all the lines, or null when there is no vertex. */
-export function boundsOf(lines: Iterable<readonly Position[]>): Bounds | null {
-  let [west, south, east, north] = [Infinity, Infinity, -Infinity, -Infinity];
-  for (const line of lines) {
-    for (const [lonDeg, latDeg] of line) {
-      west = Math.min(west, lonDeg);
-      south = Math.min(south, latDeg);
-      east = Math.max(east, lonDeg);
-      north = Math.max(north, latDeg);
-    }
-  }
-  return west === Infinity ? null : [west, south, east, north];
-}
-
-/** The place halfway along a line, by length; null for a line without vertices. */
-export function middleOf(line: readonly Position[]): Position | null {
-  const halfM = lineLengthM(line) / 2;
-  let walkedM = 0;
-  for (let index = 1; index < line.length; index += 1) {
-    const from = line[index - 1];
-    const to = line[index];
-    if (!from || !to) continue;
-    const edgeM = distanceM(from, to);
-    if (walkedM + edgeM >= halfM && edgeM > 0) {
-      const share = (halfM - walkedM) / edgeM;
-      return [from[0] + (to[0] - from[0]) * share, from[1] + (to[1] - from[1]) * share];
-    }
-    walkedM += edgeM;
-  }
-  return line[0] ?? null;
-}

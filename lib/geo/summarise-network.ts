@@ -10,7 +10,8 @@ import {
   type TrapFinding,
   type TrapKind,
 } from './network';
-import { boundsOf, middleOf, type Position } from './position';
+import { boundsOf, middleOf } from './extent';
+import { type Position } from './position';
 
 /** Lane-kilometres of a segment: its length times its lanes. */
 export function laneKmOf({ lengthM, lanes }: Pick<NetworkSegment, 'lengthM' | 'lanes'>): number {

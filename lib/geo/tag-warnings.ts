@@ -1,5 +1,6 @@
 import { type NetworkWarning } from './network';
-import { middleOf } from './position';
+import { middleOf } from './extent';
+
 import { type AttributedLine, type SplitLines } from './split-lines';
 
 const MOST_IDS = 50;

@@ -4,7 +4,8 @@ import { UploadNetworkQuery, UploadNetworkReply } from '@/lib/contracts/network'
 import { suggestAttribution } from '@/lib/geo/attribution';
 import { type NetworkWarning } from '@/lib/geo/network';
 import { checkPlace } from '@/lib/geo/place-check';
-import { boundsOf } from '@/lib/geo/position';
+import { boundsOf } from '@/lib/geo/extent';
+
 import { readGeoJson } from '@/lib/geo/read-geojson';
 import { Problem } from '@/lib/problem';
 import { handle } from '@/lib/server/handle';
