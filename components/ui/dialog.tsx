@@ -16,61 +16,17 @@ export type DialogProps = Readonly<{
   className?: string;
 }>;
 
-const overlay = 'fixed inset-0 z-40 bg-black/55';
-
-/** Asks for something before anything else goes on. Escape and the close button leave it. */
-export function Dialog({ isOpen, onOpenChange, title, description, children, className }: DialogProps) {
+/** What a dialog and a sheet share: the rest of the page waits, Escape and the close button leave it. */
+function Over({ isOpen, onOpenChange, title, description, children, className }: DialogProps) {
   const portalRoot = usePortalRoot();
   return (
     <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
       <Primitive.Portal container={portalRoot}>
-        <Primitive.Overlay className={overlay} />
-        <Primitive.Content
-          {...(description ? {} : { 'aria-describedby': undefined })}
-          className={classNames(
-            'appear fixed inset-x-4 top-[max(1rem,10vh)] z-50 mx-auto max-h-[80vh] max-w-lg overflow-y-auto rounded-lg border bg-panel p-5 text-ink shadow-2xl outline-none',
-            className,
-          )}
-        >
-          <header className="mb-4 flex items-start justify-between gap-4">
-            <div>
-              <Primitive.Title className="text-xl font-bold">{title}</Primitive.Title>
-              {description ? (
-                <Primitive.Description className="mt-1 text-soft">{description}</Primitive.Description>
-              ) : null}
-            </div>
-            <Primitive.Close asChild>
-              <Button variant="quiet" size="small">
-                Close
-              </Button>
-            </Primitive.Close>
-          </header>
-          {children}
-        </Primitive.Content>
-      </Primitive.Portal>
-    </Primitive.Root>
-  );
-}
-
-export type SheetProps = DialogProps & Readonly<{ side?: 'right' | 'bottom' }>;
-
-const sides = {
-  right: 'inset-y-0 right-0 w-[min(28rem,100vw)] border-l',
-  bottom: 'inset-x-0 bottom-0 max-h-[85dvh] rounded-t-xl border-t pb-[max(1.25rem,env(safe-area-inset-bottom))]',
-} as const;
-
-/** Work beside the page it belongs to. */
-export function Sheet({ isOpen, onOpenChange, title, description, children, className, side = 'right' }: SheetProps) {
-  const portalRoot = usePortalRoot();
-  return (
-    <Primitive.Root open={isOpen} onOpenChange={onOpenChange}>
-      <Primitive.Portal container={portalRoot}>
-        <Primitive.Overlay className={overlay} />
+        <Primitive.Overlay className="fixed inset-0 z-40 bg-black/55" />
         <Primitive.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
           className={classNames(
             'appear fixed z-50 overflow-y-auto bg-panel p-5 text-ink shadow-2xl outline-none',
-            sides[side],
             className,
           )}
         >
@@ -92,4 +48,22 @@ export function Sheet({ isOpen, onOpenChange, title, description, children, clas
       </Primitive.Portal>
     </Primitive.Root>
   );
+}
+
+/** Asks for something before anything else goes on. */
+export function Dialog({ className, ...rest }: DialogProps) {
+  const look = 'inset-x-4 top-[max(1rem,10vh)] mx-auto max-h-[80vh] max-w-lg rounded-lg border';
+  return <Over {...rest} className={classNames(look, className)} />;
+}
+
+export type SheetProps = DialogProps & Readonly<{ side?: 'right' | 'bottom' }>;
+
+const sides = {
+  right: 'inset-y-0 right-0 w-[min(28rem,100vw)] border-l',
+  bottom: 'inset-x-0 bottom-0 max-h-[85dvh] rounded-t-xl border-t pb-[max(1.25rem,env(safe-area-inset-bottom))]',
+} as const;
+
+/** Work beside the page it belongs to. */
+export function Sheet({ side = 'right', className, ...rest }: SheetProps) {
+  return <Over {...rest} className={classNames(sides[side], className)} />;
 }

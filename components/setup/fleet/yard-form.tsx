@@ -1,5 +1,6 @@
 'use client';
 
+import { PlaceFields } from '@/components/setup/place-fields';
 import { Checkbox } from '@/components/ui/checkbox';
 import { Field } from '@/components/ui/field';
 import { Form, type FormSubmission } from '@/components/ui/form';
@@ -30,22 +31,7 @@ export function YardForm({ yard, submission }: YardFormProps) {
         <Field label="Holds brine" error={fields.brineCapacityL}>
           <NumberInput name="brineCapacityL" quantity="volume" defaultValue={yard?.brineCapacityL} digits={0} />
         </Field>
-        <Field label="Latitude, degrees north" error={fields.latitudeDeg}>
-          <TextInput
-            name="latitudeDeg"
-            inputMode="decimal"
-            className="text-right font-mono"
-            defaultValue={yard?.latitudeDeg ?? ''}
-          />
-        </Field>
-        <Field label="Longitude, degrees east" error={fields.longitudeDeg}>
-          <TextInput
-            name="longitudeDeg"
-            inputMode="decimal"
-            className="text-right font-mono"
-            defaultValue={yard?.longitudeDeg ?? ''}
-          />
-        </Field>
+        <PlaceFields place={yard} fields={fields} />
       </div>
       <Checkbox name="isActive" label="In use" defaultChecked={yard?.isActive ?? true} />
     </Form>

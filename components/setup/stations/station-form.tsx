@@ -1,5 +1,6 @@
 'use client';
 
+import { PlaceFields } from '@/components/setup/place-fields';
 import { Checkbox } from '@/components/ui/checkbox';
 import { Field } from '@/components/ui/field';
 import { Form, type FormSubmission } from '@/components/ui/form';
@@ -30,22 +31,7 @@ export function StationForm({ station, zone, submission }: StationFormProps) {
         <TextInput name="name" defaultValue={station?.name ?? ''} autoComplete="off" />
       </Field>
       <div className="grid grid-cols-2 gap-5">
-        <Field label="Latitude, degrees north" error={fields.latitudeDeg}>
-          <TextInput
-            name="latitudeDeg"
-            inputMode="decimal"
-            className="text-right font-mono"
-            defaultValue={station?.latitudeDeg ?? ''}
-          />
-        </Field>
-        <Field label="Longitude, degrees east" error={fields.longitudeDeg}>
-          <TextInput
-            name="longitudeDeg"
-            inputMode="decimal"
-            className="text-right font-mono"
-            defaultValue={station?.longitudeDeg ?? ''}
-          />
-        </Field>
+        <PlaceFields place={station} fields={fields} />
       </div>
       <Field label="Height above the sea" error={fields.heightM}>
         <NumberInput name="heightM" quantity="shortDistance" defaultValue={station?.heightM ?? 0} digits={0} />
