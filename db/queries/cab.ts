@@ -1,4 +1,6 @@
 import { selectRows } from '../transaction';
+import { listYards } from './fleet';
+import { listMaterials, type MaterialRecord } from './materials';
 
 export interface CabTruck {
   id: number;
@@ -39,20 +41,20 @@ export async function listRoadChoices(): Promise<RoadChoice[]> {
   );
 }
 
-export interface CabMaterial {
-  id: number;
-  name: string;
-  form: 'solid' | 'prewet' | 'liquid' | 'abrasive';
-  densityKgPerM3: number;
-}
+export type CabMaterial = Pick<MaterialRecord, 'id' | 'name' | 'form' | 'densityKgPerM3'>;
 
+/** What trucks carry most stands first. */
+const formOrder = ['prewet', 'solid', 'liquid', 'abrasive'];
+
+/** Materials in use, as a driver chooses among them. */
 export async function listCabMaterials(): Promise<CabMaterial[]> {
-  return selectRows<CabMaterial>(
-    `select id, name, form, density_kg_per_m3 as "densityKgPerM3" from materials where is_active
-      order by case form when 'prewet' then 0 when 'solid' then 1 when 'liquid' then 2 else 3 end, name`,
-  );
+  const materials = (await listMaterials()).filter((material) => material.isActive);
+  return materials
+    .map(({ id, name, form, densityKgPerM3 }) => ({ id, name, form, densityKgPerM3 }))
+    .sort((a, b) => formOrder.indexOf(a.form) - formOrder.indexOf(b.form) || a.name.localeCompare(b.name));
 }
 
+/** Yards in use. */
 export async function listCabYards(): Promise<{ id: number; name: string }[]> {
-  return selectRows<{ id: number; name: string }>('select id, name from yards where is_active order by name');
+  return (await listYards()).filter((yard) => yard.isActive).map(({ id, name }) => ({ id, name }));
 }

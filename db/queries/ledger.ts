@@ -1,4 +1,3 @@
-import { type LedgerMaterial } from '@/lib/ledger/account';
 import { selectRows } from '../transaction';
 
 export interface LedgerEntryRecord {
@@ -42,35 +41,5 @@ export async function listLedgerEntries({ stormId }: { stormId: number }): Promi
         and not exists (select 1 from spread_entries a where a.amends_id = e.id)
       order by e.spread_at, e.id`,
     { stormId },
-  );
-}
-
-export interface LedgerMaterialRecord extends LedgerMaterial {
-  form: 'solid' | 'prewet' | 'liquid' | 'abrasive';
-  densityKgPerM3: number;
-}
-
-export async function listLedgerMaterials(): Promise<LedgerMaterialRecord[]> {
-  return selectRows<LedgerMaterialRecord>(
-    `select id, name, form, composition, density_kg_per_m3 as "densityKgPerM3",
-            cost_cents_per_tonne as "costCentsPerTonne" from materials`,
-  );
-}
-
-export interface StormHead {
-  id: number;
-  number: number;
-  name: string;
-  fromAt: Date;
-  untilAt: Date;
-  openedAt: Date;
-  closedAt: Date | null;
-}
-
-/** Storms for choosing one, newest first. */
-export async function listStormHeads(): Promise<StormHead[]> {
-  return selectRows<StormHead>(
-    `select id, number, name, from_at as "fromAt", until_at as "untilAt", opened_at as "openedAt", closed_at as "closedAt"
-       from storms order by opened_at desc`,
   );
 }

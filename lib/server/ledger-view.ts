@@ -1,7 +1,9 @@
 import { differenceInCalendarDays } from 'date-fns';
 import { findAgency } from '@/db/queries/agency';
-import { listLedgerEntries, listLedgerMaterials, listStormHeads, type LedgerEntryRecord } from '@/db/queries/ledger';
+import { listLedgerEntries, type LedgerEntryRecord } from '@/db/queries/ledger';
+import { listMaterials } from '@/db/queries/materials';
 import { listRunHeads, type RunHead } from '@/db/queries/runs';
+import { findStormRow } from '@/db/queries/storms';
 import { type LedgerRoad, type LedgerRun, type LedgerView } from '@/lib/contracts/ledger';
 import { accountFor, massKg, medianRate, type LedgerMaterial } from '@/lib/ledger/account';
 import { notesFor } from '@/lib/ledger/notes';
@@ -11,12 +13,12 @@ type Materials = ReadonlyMap<number, LedgerMaterial & { form: string; densityKgP
 
 /** A storm's ledger: recommended beside spread by run and road, the totals, and what needs a look. */
 export async function readLedger(stormId: number): Promise<LedgerView> {
-  const storm = (await listStormHeads()).find((head) => head.id === stormId);
+  const storm = await findStormRow({ id: stormId });
   if (!storm) throw new Problem('not-found', { what: 'storm' });
   const [entries, heads, materialRows, agency] = await Promise.all([
     listLedgerEntries({ stormId }),
     listRunHeads({ stormId }),
-    listLedgerMaterials(),
+    listMaterials(),
     findAgency(),
   ]);
   const materials: Materials = new Map(materialRows.map((material) => [material.id, material]));
