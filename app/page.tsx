@@ -1,8 +1,9 @@
 import { redirect } from 'next/navigation';
+import { mayEver } from '@/lib/permissions';
 import { getActor } from '@/lib/server/session';
 
 export default async function Home() {
   const actor = await getActor();
   if (!actor) redirect('/sign-in');
-  redirect(actor.role === 'driver' ? '/cab' : '/roads');
+  redirect(mayEver(actor.role, 'roads.view') ? '/roads' : '/cab');
 }

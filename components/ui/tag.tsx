@@ -34,19 +34,3 @@ export function Tag({ tone = 'plain', children, className }: TagProps) {
     </span>
   );
 }
-
-/** The same, as a rounded outline: for the one state a header must show. */
-export function Pill({ tone = 'plain', children, className }: TagProps) {
-  return (
-    <span
-      className={classNames(
-        'inline-flex min-h-7 items-center rounded-full border px-3 text-sm font-semibold',
-        strokes[tone],
-        words[tone],
-        className,
-      )}
-    >
-      {children}
-    </span>
-  );
-}

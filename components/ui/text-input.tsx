@@ -10,9 +10,3 @@ export type TextInputProps = Readonly<ComponentProps<'input'>>;
 export function TextInput({ className, type = 'text', ...rest }: TextInputProps) {
   return <input {...useField()} {...rest} type={type} className={classNames(inputLook, className)} />;
 }
-
-export type TextAreaProps = Readonly<ComponentProps<'textarea'>>;
-
-export function TextArea({ className, rows = 3, ...rest }: TextAreaProps) {
-  return <textarea {...useField()} {...rest} rows={rows} className={classNames(inputLook, className)} />;
-}

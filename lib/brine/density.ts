@@ -1,6 +1,6 @@
 import { densityParameters } from './density-parameters';
 import { eutecticOf } from './liquidus';
-import { saltPerWaterOf, type Salt, type Solute } from './salts';
+import { saltPerWaterOf, type Solute } from './salts';
 
 /** Warmest temperature at which all four salts were measured, °C. */
 const WARMEST_C = 98;
@@ -85,10 +85,4 @@ export function brineDensityKgPerM3(solutes: readonly Solute[], tempC: number): 
   const limitMassFraction = highestDensityMassFraction(present);
   if (total > limitMassFraction) return { ok: false, reason: 'above-saturation', limitMassFraction };
   return { ok: true, densityKgPerM3: unboundedDensityKgPerM3(present, tempC) };
-}
-
-/** kg of one anhydrous salt in a litre of its brine at a temperature in °C: strength × density. NaCl 23.3 % at 20 °C: 0.274. */
-export function saltKgPerLitre(salt: Salt, massFraction: number, tempC: number): number | null {
-  const density = brineDensityKgPerM3([{ salt, massFraction }], tempC);
-  return density.ok ? (massFraction * density.densityKgPerM3) / 1000 : null;
 }

@@ -46,11 +46,6 @@ export function chlorideMassFraction(salt: Salt, waters = 0): number {
   return (chloridesOf[salt] * CHLORINE_G_PER_MOL) / (molarMassGPerMol[salt] + waters * WATER_G_PER_MOL);
 }
 
-/** kg of anhydrous salt per kg of the hydrate with `waters` molecules of water. CaCl2·2H2O 0.7549. */
-export function anhydrousMassFraction(salt: Salt, waters: number): number {
-  return molarMassGPerMol[salt] / (molarMassGPerMol[salt] + waters * WATER_G_PER_MOL);
-}
-
 /** Mass fraction of the brine → kg of salt per kg of water, `w/(1 − w)`. RangeError outside 0 ≤ w < 1. */
 export function massFractionToSaltPerWater(massFraction: number): number {
   if (!(massFraction >= 0 && massFraction < 1)) {

@@ -1,5 +1,4 @@
 import { z } from 'zod';
-import { checkNames } from '@/lib/readings/checks';
 import { delimiters, encodings, faultsOfMapping, type Mapping } from '@/lib/readings/mapping';
 import { isWordQuantity, quantities, type ReadingQuantity } from '@/lib/readings/quantities';
 import { EARLIEST_MS } from '@/lib/readings/read-row';
@@ -149,5 +148,3 @@ export type SaveStationInput = z.output<typeof SaveStationInput>;
 
 export const IssueStationKeyInput = z.strictObject({ stationId: typedId });
 export const RevokeStationKeyInput = z.strictObject({ keyId: typedId });
-
-export const ReadingFlags = z.partialRecord(z.enum(quantities), z.array(z.enum(checkNames)));

@@ -1,9 +1,4 @@
-import { CHLORINE_G_PER_MOL, chloridesOf, molarMassGPerMol, type Salt } from '@/lib/brine/salts';
-
-/** kg of chloride per kg of an anhydrous salt, from molar masses. NaCl 0.6066. */
-function chloridePerSalt(salt: Salt): number {
-  return (chloridesOf[salt] * CHLORINE_G_PER_MOL) / molarMassGPerMol[salt];
-}
+import { chlorideMassFraction, type Salt } from '@/lib/brine/salts';
 
 export interface LedgerMaterial {
   id: number;
@@ -56,7 +51,7 @@ export function massKg(rateGPerM2: number | null, areaM2: number): number {
 
 /** kg of chloride in `productKg` of a product. NaCl, 1000 kg: 606.6 kg. */
 export function chlorideKg(material: LedgerMaterial, productKg: number): number {
-  return sumOverSalts(material, (salt, fraction) => fraction * chloridePerSalt(salt)) * productKg;
+  return sumOverSalts(material, (salt, fraction) => fraction * chlorideMassFraction(salt)) * productKg;
 }
 
 function sumOverSalts(material: LedgerMaterial, term: (salt: Salt, fraction: number) => number): number {

@@ -3,7 +3,6 @@ import { type WallTime } from './date-layout';
 import { type Clock, type ColumnMapping, type Mapping, timeColumnsOf } from './mapping';
 import { BadCell, createCellReader, type CellReader } from './read-cell';
 import { createTimeReader } from './read-time';
-import { quantityFacts } from './quantities';
 import { factsOfUnit, isOverInterval } from './units';
 
 /** What a row says of one instant; a column with a clock of its own speaks of another. */
@@ -164,9 +163,3 @@ const headAgain = (column: string): RowReading => ({
   column,
   reason: 'The heads are repeated on this line.',
 });
-
-/** What a column measures and in what, for a reader: `Air temperature, °F`. */
-export function describeColumn({ quantity, unit }: Pick<ColumnMapping, 'quantity' | 'unit'>): string {
-  const { label } = quantityFacts[quantity];
-  return unit === 'word' ? label : `${label}, ${unit}`;
-}

@@ -37,6 +37,12 @@ interface Given<P, Q, B, S, M> {
   machine: M | null;
 }
 
+/** The person of a route that only people call. */
+export function personOf(actor: SignedIn | null): SignedIn {
+  if (!actor) throw new Problem('not-signed-in');
+  return actor;
+}
+
 export const madeByHandle = Symbol.for('rimewright.handle');
 
 function parse<S extends ZodType>(schema: S | undefined, value: unknown): Out<S> {

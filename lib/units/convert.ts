@@ -188,11 +188,6 @@ export function knotsToMPerS(speedKnots: number): number {
   return (speedKnots * M_PER_NAUTICAL_MILE) / 3600;
 }
 
-/** m² → sq ft. */
-export function m2ToSqFt(areaM2: number): number {
-  return areaM2 / (M_PER_FT * M_PER_FT);
-}
-
 /** kg/m³ → lb per US gallon. 1,000 kg/m³ is 8.3454 lb/gal. */
 export function kgPerM3ToLbPerUsGal(densityKgPerM3: number): number {
   return (densityKgPerM3 * L_PER_US_GAL) / (1000 * KG_PER_LB);

@@ -12,7 +12,7 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { useIsOnline, useNow } from '@/components/ui/use-now';
 import { newId } from '@/lib/client/new-id';
-import { type Actor } from '@/lib/permissions';
+import { mayEver, type Actor } from '@/lib/permissions';
 import { formatTime } from '@/lib/time/format';
 import { messageOf } from './messages';
 import { RunScreen } from './run-screen';
@@ -105,7 +105,7 @@ function RefusedNotices({ sentences }: Readonly<{ sentences: readonly string[] }
 }
 
 function LeaveLinks({ role, waiting }: Readonly<{ role: Actor['role']; waiting: number }>) {
-  return role === 'driver' ? (
+  return !mayEver(role, 'roads.view') ? (
     <Button
       variant="quiet"
       className="min-h-12"

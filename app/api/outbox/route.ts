@@ -1,6 +1,6 @@
 import { applyOutboxMessage } from '@/db/commands/apply-outbox-message';
 import { OutboxMessage, Recorded } from '@/lib/contracts/runs';
-import { handle } from '@/lib/server/handle';
+import { handle, personOf } from '@/lib/server/handle';
 import { outboxSubject } from '@/lib/server/run-subject';
 
 /** Where a tablet sends what it kept: one message at a time, oldest first, harmless to repeat. */
@@ -11,5 +11,5 @@ export const POST = handle(
     reply: Recorded,
     subject: ({ body, actor }) => outboxSubject(body, actor.id),
   },
-  ({ body, actor }) => applyOutboxMessage({ message: body, by: actor?.id ?? 0, now: new Date() }),
+  ({ body, actor }) => applyOutboxMessage({ message: body, by: personOf(actor).id, now: new Date() }),
 );

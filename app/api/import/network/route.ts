@@ -8,7 +8,7 @@ import { boundsOf } from '@/lib/geo/extent';
 
 import { readGeoJson } from '@/lib/geo/read-geojson';
 import { Problem } from '@/lib/problem';
-import { handle } from '@/lib/server/handle';
+import { handle, personOf } from '@/lib/server/handle';
 import { readFile } from './read-file';
 
 const guessedEncoding: NetworkWarning = {
@@ -38,7 +38,7 @@ export const POST = handle(
       attribution: query.attribution ?? suggestAttribution(lines),
       mapping: await findLastMapping({ source }),
       payload: { lines, skipped, warnings: [...warnings, ...place, ...(isGuessedEncoding ? [guessedEncoding] : [])] },
-      by: actor?.id ?? 0,
+      by: personOf(actor).id,
       now: new Date(),
     });
   },
