@@ -33,12 +33,15 @@ const MINUTE_MS = 60_000;
 
 type ColumnOf = (index: number) => string[];
 
+/** Nine rows in ten have to fit, and in a short sample all but one: a single bad row must not hide the column of the time. */
+const enoughOf = (rows: number) => (rows < 5 ? rows * 0.9 : Math.min(rows * 0.9, rows - 1));
+
 /** The wall times of a pattern, or null when it does not read nearly all of the texts. */
 function wallTimes(pattern: string, texts: readonly string[]): number[] | null {
   const compiled = compileLayout(pattern);
   if (!compiled.ok || texts.length === 0) return null;
   const read = texts.map((text) => compiled.layout.read(text.trim())?.wallMs).filter((ms) => ms !== undefined);
-  if (read.length < texts.length * 0.9) return null;
+  if (read.length < enoughOf(texts.length)) return null;
   // Ten digits are seconds of our time; an eight-digit date is no epoch.
   if (pattern.startsWith('epoch') && read.some((ms) => ms < 6e11 || ms > 4.2e12)) return null;
   return read;
@@ -114,6 +117,8 @@ function guessParts(names: readonly string[], columnOf: ColumnOf): TimeGuess | n
   return { time, stepMin: stepMinOf(ms), doubts };
 }
 
+/** Heads of a column that can be a clock by its bare numbers; any other must write its times with a colon. */
+const clockHead = /time|zeit|uhr|clock|hour|stunde|^(h|hh|hhmm|std)$/i;
 const timeHead = /time|date|datum|zeit|stamp|^ts$|utc|valid/i;
 
 function doubtOf(isSure: boolean, pattern: string): Doubt[] {
@@ -138,9 +143,10 @@ function guessTwo(names: readonly string[], columnOf: ColumnOf): TimeGuess | nul
       )
         continue;
       const timeTexts = columnOf(time);
+      const hasClockHead = clockHead.test((names[time] ?? '').trim());
       const texts = dateTexts.map((text, index) => `${text.trim()} ${(timeTexts[index] ?? '').trim()}`);
       const best = bestPattern(
-        whole.filter((pattern) => pattern.includes(' ')),
+        whole.filter((pattern) => pattern.includes(' ') && (hasClockHead || pattern.includes(':'))),
         texts,
       );
       if (!best) continue;

@@ -61,6 +61,22 @@ describe('guessing how a file is made', () => {
     });
   });
 
+  it('one bad time of six does not make a wind column the clock', () => {
+    const times = ['00:00', '00:10', '00:20', '00:30', '25:40', '00:50'];
+    const rows = times.map((time, i) => `14.01.2026;${time};-1,${i};-2,4;91;${11 + i}`);
+    const { mapping } = guess(utf8(`Date;Time;Air temp (°C);Pavement (°C);RH (%);Wind (km/h)\n${rows.join('\n')}\n`));
+    expect(mapping.time).toMatchObject({ kind: 'two', dateColumn: 'Date', timeColumn: 'Time', timePattern: 'HH:mm' });
+    expect(measured(mapping)).toContain('Wind (km/h) windSpeedMPerS km/h');
+  });
+
+  it('bare numbers beside a date are a clock only under a head that says so', () => {
+    const table = (head: string) => `Date;${head};Air temp (°C)\n${lines(12, (i) => `14.01.2026;${i};-1.5`)}`;
+    expect(guess(utf8(table('Hour'))).mapping.time).toMatchObject({ timeColumn: 'Hour' });
+    const guessed = guessMapping({ bytes: utf8(table('Wind')), isWhole: true, clock });
+    const time = guessed.ok && guessed.mapping.time.kind === 'two' ? guessed.mapping.time.timeColumn : null;
+    expect(time).not.toBe('Wind');
+  });
+
   it('tenths with their error codes, behind a byte order mark, tabs and lines that are no table', () => {
     const { mapping } = guess(
       utf8(

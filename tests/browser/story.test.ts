@@ -91,6 +91,9 @@ describe.each(nights)('the whole job, $theme', ({ theme, driver, name }) => {
     await page.getByRole('link', { name: 'Download the rejected rows' }).first().click();
     const rejected = readFileSync(await (await started).path(), 'utf8');
     expect(rejected.trim().split(/\r?\n/)).toHaveLength(3);
+    expect(rejected).toContain('broken');
+    expect(rejected).toContain('25:40');
+    expect(rejected).not.toContain('already has');
     await leave();
   });
 
